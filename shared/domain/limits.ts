@@ -1,0 +1,23 @@
+/** Sizes that a form, a contract and a table agree on. Lengths in characters, sizes in bytes. */
+export const limits = {
+  name: 80,
+  title: 120,
+  question: 280,
+  line: 200,
+  remark: 1000,
+  reason: 300,
+  headline: 180,
+  summary: 2000,
+  email: 254,
+  passwordLeast: 10,
+  passwordMost: 200,
+  eveningUnits: { least: 3, most: 6 },
+  eveningListeners: { least: 2, most: 24 },
+  tracks: 12,
+  descriptorsMost: 19,
+  importBytes: 8 * 1024 * 1024,
+  importRows: 100_000,
+  jsonBytes: 256 * 1024,
+  photoBytes: 12 * 1024 * 1024,
+  photoPixels: 50_000_000,
+} as const
