@@ -64,7 +64,10 @@ export function addressOf<E extends Endpoint>(
 
 /** A caller for one origin; tests give their own `fetch` that keeps cookies. */
 export function createCall(origin = '', fetcher: typeof fetch = (...input) => fetch(...input)): Caller {
-  return async <E extends Endpoint>(endpoint: E, input: CallInput<E> = {}): Promise<z.output<E['response']>> => {
+  return async <E extends Endpoint>(
+    endpoint: E,
+    input: CallInput<E> = {},
+  ): Promise<z.output<E['response']>> => {
     const headers: Record<string, string> = { Accept: 'application/json' }
     if (input.idempotencyKey) headers['Idempotency-Key'] = input.idempotencyKey
     if (input.version !== undefined) headers['If-Match'] = `"${input.version}"`
