@@ -19,6 +19,8 @@ export const tableSeat = z.strictObject({
       state: z.enum(servingStates),
       version: z.number().int(),
       wrongCodes: z.number().int(),
+      /** How the seal check went; null until the listener has said. */
+      seal: z.enum(['yes', 'unsure', 'no']).nullable(),
       restUntil: instant.nullable(),
     })
     .nullable(),
