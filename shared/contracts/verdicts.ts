@@ -65,6 +65,7 @@ export const verdictDraft = z.strictObject({
   /** Sentences that Scrim wrote from the numbers; they stand beside the organiser's own. */
   sentences: z.array(z.string()),
   units: z.array(publishedUnit),
+  /** `field` is the input's name on the desk: `headline`, `summary`, `units.0.provenance` (index into `units`). */
   missing: z.array(z.strictObject({ field: z.string(), what: z.string() })),
   published: z.strictObject({ slug, version: z.number().int(), at: instant }).nullable(),
   version: z.number().int(),
@@ -126,6 +127,8 @@ export type PublicVerdict = z.infer<typeof publicVerdict>
 
 export const verdictLine = z.strictObject({
   slug,
+  /** The number in `/v/:number`. */
+  number: z.number().int(),
   headline: z.string(),
   panelName: z.string(),
   publishedAt: instant,
