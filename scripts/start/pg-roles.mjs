@@ -4,8 +4,10 @@ import { join } from 'node:path'
 import { run } from './processes.mjs'
 
 /**
- * Three roles: `postgres` makes the others and nothing else; `scrim_owner` owns the tables and migrates;
- * `scrim_app` is what the application connects as, owns nothing and cannot pass by row-level security.
+ * Four roles: `postgres` makes the others and nothing else; `scrim_owner` owns the tables and migrates;
+ * `scrim_app` is what the application connects as, owns nothing and cannot pass by row-level security;
+ * `scrim_key` reads the key of a round: nobody signs in as it, and `scrim_app` has its rights only in a statement
+ * that says `set local role scrim_key`.
  * @typedef {{ postgres: string, scrim_owner: string, scrim_app: string }} Passwords
  */
 
@@ -50,16 +52,17 @@ export async function psql({ binaries, port, password, database = 'postgres' }, 
  * @param {string[]} databases
  */
 export function rolesSql(passwords, databases) {
-  const role = (name) => `
+  const role = (name, more) => `
 select 'create role ${name}' where not exists (select from pg_roles where rolname = '${name}') \\gexec
-alter role ${name} login nosuperuser nocreatedb nocreaterole noreplication nobypassrls
-  password '${passwords[name]}';`
+alter role ${name} nosuperuser nocreatedb nocreaterole noreplication nobypassrls ${more};`
+  const login = (name, more = '') => role(name, `${more} login password '${passwords[name]}'`)
   const database = (name) => `
 select 'create database ${name} owner scrim_owner'
   where not exists (select from pg_database where datname = '${name}') \\gexec
 revoke all on database ${name} from public;
 grant connect, temporary on database ${name} to scrim_app;`
-  return [role('scrim_owner'), role('scrim_app'), ...databases.map(database)].join('\n')
+  const roles = [login('scrim_owner'), login('scrim_app', 'noinherit'), role('scrim_key', 'nologin')]
+  return [...roles, 'grant scrim_key to scrim_app;', ...databases.map(database)].join('\n')
 }
 
 /** @param {string} role @param {string} password @param {number} port @param {string} database */
