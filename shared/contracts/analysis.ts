@@ -135,6 +135,7 @@ export const agreement = z.strictObject({
   ),
   results: z.array(descriptorResult),
   computed: z.strictObject({ at: instant, digest: fingerprint, library: z.string(), seed: z.string() }),
+  can: z.strictObject({ publish: z.boolean() }),
 })
 export type Agreement = z.infer<typeof agreement>
 
@@ -162,6 +163,7 @@ export const reveal = z.strictObject({
       n: z.number().int(),
     }),
   ),
+  /** One a listener; its values stand in the order of `units`. */
   threads: z.array(z.strictObject({ values: z.array(z.number().nullable()) })),
   sentence: z.string(),
 })
