@@ -1,25 +1,29 @@
 import type { FieldErrors, FieldValues, Path, UseFormSetError } from 'react-hook-form'
 import { CallError } from './call.ts'
 
-/** One fault of a form, by input name with dots: `units.0.name`. */
+/** One fault of a form; `field` is the input's name with dots, `units.0.name`, which is also its entry's id. */
 export interface Fault {
-  name: string
+  field: string
   message: string
 }
 
-const isLeaf = (value: object): value is { message?: unknown; type: unknown } =>
-  'type' in value && typeof (value as { type: unknown }).type !== 'object'
+const ownKeys = new Set(['ref', 'message', 'type', 'types'])
 
-/** All faults of a form in the order in which its fields were declared; a fault of a whole list keeps the list's name. */
+/** All faults of a form in the order of its fields; a fault of a whole list keeps the list's name. */
 export function faultsOf(errors: FieldErrors, prefix = ''): Fault[] {
   return Object.entries(errors).flatMap(([key, value]): Fault[] => {
-    if (!value || typeof value !== 'object' || key === 'ref') return []
-    const name = key === 'root' && prefix ? prefix : prefix ? `${prefix}.${key}` : key
-    const own = isLeaf(value) && typeof value.message === 'string' && value.message !== ''
-    const message = own ? [{ name, message: value.message as string }] : []
-    if (isLeaf(value) && !Array.isArray(value)) return message
-    return [...message, ...faultsOf(value as FieldErrors, name)]
+    if (!value || typeof value !== 'object' || ownKeys.has(key)) return []
+    const field = [prefix, key].filter((part) => part !== '' && !(part === 'root' && prefix !== '')).join('.')
+    const { message } = value as { message?: unknown }
+    const own = typeof message === 'string' && message !== '' ? [{ field, message }] : []
+    return [...own, ...faultsOf(value as FieldErrors, field)]
   })
+}
+
+/** What the server said that no single input can show. */
+export interface Unplaced {
+  faults: Fault[]
+  problem: CallError | null
 }
 
 /**
@@ -29,11 +33,11 @@ export function faultsOf(errors: FieldErrors, prefix = ''): Fault[] {
 export function placeFaults<T extends FieldValues>(
   error: unknown,
   setError: UseFormSetError<T>,
-  has: (name: string) => boolean = () => true,
-): { left: Fault[]; problem: CallError | null } {
+  has: (field: string) => boolean = () => true,
+): Unplaced {
   if (!(error instanceof CallError)) throw error
-  const fields = Object.entries(error.fields)
-  for (const [name, message] of fields) if (has(name)) setError(name as Path<T>, { type: 'server', message })
-  const left = fields.filter(([name]) => !has(name)).map(([name, message]) => ({ name, message }))
-  return { left, problem: fields.length === 0 ? error : null }
+  const told = Object.entries(error.fields).map(([field, message]) => ({ field, message }))
+  for (const { field, message } of told)
+    if (has(field)) setError(field as Path<T>, { type: 'server', message })
+  return { faults: told.filter(({ field }) => !has(field)), problem: told.length === 0 ? error : null }
 }

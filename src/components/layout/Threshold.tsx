@@ -1,0 +1,20 @@
+import type { ReactNode } from 'react'
+import { Cloth } from '../Cloth.tsx'
+import { Mark } from '../Mark.tsx'
+
+/** Sign-in and its kin: the form stands in the selvedge's column, the rest is cloth with the mark. */
+export function Threshold({ children }: { children: ReactNode }) {
+  return (
+    <div className="threshold">
+      <div className="threshold-cloth clothed">
+        <Cloth />
+        <span className="threshold-mark">
+          <Mark size={72} />
+        </span>
+      </div>
+      <main id="matter" tabIndex={-1} className="threshold-matter">
+        {children}
+      </main>
+    </div>
+  )
+}

@@ -1,0 +1,56 @@
+import { asDay } from '#src/components/results/dates.ts'
+import { capital, inWords, listed } from '#src/components/results/figures.ts'
+import type { Provenance } from './disclosure-wording.ts'
+
+interface Unit {
+  name: string
+  provenance: Provenance | null
+  lender: string | null
+  returnOn: string | null
+}
+
+const from = (unit: Unit): string => {
+  const lender = unit.lender ? ` from ${unit.lender}` : ''
+  const until = unit.returnOn ? ` until ${asDay(unit.returnOn)}` : ''
+  return lender + until
+}
+
+/** Units whose facts read the same, under one wording. */
+function grouped(units: readonly Unit[], wording: (unit: Unit) => string): [string, string[]][] {
+  const groups = new Map<string, string[]>()
+  for (const unit of units) {
+    const key = wording(unit)
+    groups.set(key, [...(groups.get(key) ?? []), unit.name])
+  }
+  return [...groups]
+}
+
+/**
+ * Who paid, in a few sentences: how many were bought, and by name everything that was lent, given, discounted or not
+ * yet for sale. "Four of six units were bought. Dunlin and Avocet: on loan from a shop until 30 November 2026."
+ */
+export function whoPaid(units: readonly Unit[]): string[] {
+  const said: string[] = []
+  const bought = units.filter((unit) => unit.provenance === 'bought')
+  if (bought.length === units.length && units.length > 0)
+    said.push(`All ${inWords(units.length)} units were bought.`)
+  else if (bought.length > 0)
+    said.push(
+      `${capital(inWords(bought.length))} of ${inWords(units.length)} units ${bought.length === 1 ? 'was' : 'were'} bought.`,
+    )
+  const named: [Provenance, string][] = [
+    ['loan', 'on loan'],
+    ['gift', 'given'],
+    ['discounted', 'bought at a discount'],
+    ['prototype', 'prototype'],
+  ]
+  for (const [provenance, words] of named)
+    for (const [detail, names] of grouped(
+      units.filter((unit) => unit.provenance === provenance),
+      from,
+    ))
+      said.push(`${listed(names)}: ${words}${detail}.`)
+  const silent = units.filter((unit) => unit.provenance === null).map((unit) => unit.name)
+  if (silent.length > 0) said.push(`${listed(silent)}: not said.`)
+  return said
+}
