@@ -1,4 +1,7 @@
 import { Sequelize } from 'sequelize'
+import { useAmbientTransactions } from './ambient.ts'
+
+useAmbientTransactions()
 
 /**
  * A pool of connections to one database. BIGINT, DECIMAL and counts come back as strings (see the models).

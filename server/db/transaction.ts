@@ -25,10 +25,10 @@ export function inTransaction<T>(
 export async function setScope(
   sequelize: Sequelize,
   scope: RowScope,
-  transaction: Transaction,
+  transaction?: Transaction,
 ): Promise<void> {
   await sequelize.query(
     `select set_config('scrim.panel_id', $1, true), set_config('scrim.user_id', $2, true)`,
-    { bind: [scope.panelId ?? '', scope.userId ?? ''], transaction },
+    { bind: [scope.panelId ?? '', scope.userId ?? ''], ...(transaction ? { transaction } : {}) },
   )
 }
