@@ -74,10 +74,11 @@ export const ICC_FORMS = ['ICC(1,1)', 'ICC(2,1)', 'ICC(3,1)', 'ICC(1,k)', 'ICC(2
 export type IccForm = (typeof ICC_FORMS)[number]
 
 export interface IccEstimate extends IntervalEstimate {
-  readonly f: number
+  /** Cannot be said where listeners leave no difference at all. */
+  readonly f: Figure
   readonly df1: number
   readonly df2: number
-  readonly p: number
+  readonly p: Figure
 }
 
 export interface KendallW {
