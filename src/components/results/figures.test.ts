@@ -1,16 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import {
-  asComponent,
-  asDf,
-  asP,
-  asPoints,
-  asRange,
-  asShare,
-  asShareWithInterval,
-  count,
-  inWords,
-  listed,
-} from './figures.ts'
+import { asComponent, asDf, asP, asPoints, asRange, asShare, asShareWithInterval } from './figures.ts'
 
 const percent = { low: 0, high: 100 }
 const narrow = { low: 43, high: 72.1 }
@@ -53,13 +42,7 @@ describe('figures on screen', () => {
     expect(asP(0.0507)).toBe('0.051')
   })
 
-  it('counts and lists in words', () => {
-    expect(count(1, 'listener')).toBe('1 listener')
-    expect(count(14, 'listener')).toBe('14 listeners')
-    expect(listed(['Dunlin', 'Avocet', 'Knot'])).toBe('Dunlin, Avocet and Knot')
-    expect(listed(['Dunlin'])).toBe('Dunlin')
-    expect(inWords(4)).toBe('four')
-    expect(inWords(40)).toBe('40')
+  it('writes whole degrees of freedom whole', () => {
     expect(asDf(10)).toBe('10')
     expect(asDf(8.523)).toBe('8.52')
   })

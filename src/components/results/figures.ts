@@ -41,33 +41,3 @@ export const asP = (p: number): string => (p < 0.001 ? 'below 0.001' : p.toFixed
 
 /** Degrees of freedom: whole where they are whole, else two decimals. */
 export const asDf = (df: number): string => (Number.isInteger(df) ? String(df) : df.toFixed(2))
-
-/** "1 listener", "14 listeners". */
-export const count = (n: number, one: string, many = `${one}s`): string => `${n} ${n === 1 ? one : many}`
-
-/** "Dunlin", "Dunlin and Avocet", "Dunlin, Avocet and Knot". */
-export function listed(names: readonly string[]): string {
-  if (names.length <= 1) return names[0] ?? ''
-  return `${names.slice(0, -1).join(', ')} and ${names[names.length - 1]}`
-}
-
-const words = [
-  'no',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-]
-/** A small whole number in words, larger ones in digits. */
-export const inWords = (n: number): string => words[n] ?? String(n)
-
-/** The first letter made a capital. */
-export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1)

@@ -1,22 +1,16 @@
-import { queryOptions } from '@tanstack/react-query'
 import { getAgreement, getReveal } from '#shared/contracts/analysis.ts'
-import { call } from '#src/lib/call.ts'
+import { getRound } from '#shared/contracts/rounds.ts'
+import { ask } from '#src/lib/ask.ts'
 
 interface AtRound {
   panel: string
   round: string
 }
 
-/** What a closed round says; it changes only when exclusions do. */
-export const agreementQuery = (at: AtRound) =>
-  queryOptions({
-    queryKey: ['agreement', at.panel, at.round],
-    queryFn: ({ signal }) => call(getAgreement, { params: at, signal }),
-  })
+export const roundQuery = (at: AtRound) => ask(getRound, { params: at })
 
-export const revealQuery = (at: AtRound) =>
-  queryOptions({
-    queryKey: ['reveal', at.panel, at.round],
-    queryFn: ({ signal }) => call(getReveal, { params: at, signal }),
-    staleTime: Infinity,
-  })
+/** What a closed round says. */
+export const agreementQuery = (at: AtRound) => ask(getAgreement, { params: at })
+
+/** For the room; it does not change while it is shown. */
+export const revealQuery = (at: AtRound) => ({ ...ask(getReveal, { params: at }), staleTime: Infinity })

@@ -13,7 +13,7 @@ describe('the reveal, step by step', () => {
   it('says codes, maker, name and figures of the unit that has just come out', () => {
     expect(saidAt(exampleReveal, 1)).toEqual({
       heading: '417 and 528 were Saltmarsh Audio Tern One',
-      detail: 'Width: median 41.0, the middle half between 33.0 and 47.0, 6 ratings.',
+      detail: 'Width: median 41.0, the middle half between 33.0 and 47.0, six ratings.',
     })
   })
 

@@ -1,5 +1,6 @@
 import type { Reveal } from '#shared/contracts/analysis.ts'
-import { asPoints, asRange, count, inWords, capital, listed } from '#src/components/results/figures.ts'
+import { asPoints, asRange } from '#src/components/results/figures.ts'
+import { counted, listed, numberWord, sentenceCase } from '#src/lib/counts.ts'
 
 /** One step per unit, one more for the panel's sentence; step 0 is all cloth. */
 export const lastStep = (reveal: Pick<Reveal, 'units'>): number => reveal.units.length + 1
@@ -22,7 +23,7 @@ export function saidAt(reveal: Reveal, step: number): Said {
   if (step === 0)
     return {
       heading: reveal.title,
-      detail: `${capital(inWords(reveal.units.length))} units, still under the cloth. ${name} is shown.`,
+      detail: `${sentenceCase(numberWord(reveal.units.length))} units, still under the cloth. ${name} is shown.`,
     }
   const unit = reveal.units[step - 1]
   if (unit === undefined) return { heading: reveal.sentence, detail: '' }
@@ -33,7 +34,7 @@ export function saidAt(reveal: Reveal, step: number): Said {
     return { heading, detail: `Nobody could rate it on ${name.toLowerCase()}.` }
   return {
     heading,
-    detail: `${name}: median ${asPoints(unit.median, scale)}, the middle half ${asRange(unit.q1, unit.q3, scale)}, ${count(unit.n, 'rating')}.`,
+    detail: `${name}: median ${asPoints(unit.median, scale)}, the middle half ${asRange(unit.q1, unit.q3, scale)}, ${counted(unit.n, 'rating')}.`,
   }
 }
 

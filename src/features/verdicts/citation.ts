@@ -1,4 +1,4 @@
-import { asInstantDay } from '#src/components/results/dates.ts'
+import { day } from '#src/lib/dates.ts'
 
 interface Cited {
   panelName: string
@@ -13,6 +13,6 @@ interface Cited {
 export function citation(verdict: Cited, origin: string): string {
   const what = verdict.headline.trim() === '' ? verdict.title : verdict.headline
   const stop = /[.!?…]$/.test(what) ? '' : '.'
-  const when = asInstantDay(verdict.publishedAt, 'UTC')
+  const when = day(verdict.publishedAt, 'UTC')
   return `${verdict.panelName} (${when}). ${what}${stop} Blind listening verdict ${verdict.number}, version ${verdict.version}. ${origin}/v/${verdict.number}`
 }

@@ -1,4 +1,4 @@
-import { asDay } from '#src/components/results/dates.ts'
+import { day } from '#src/lib/dates.ts'
 
 export type Provenance = 'bought' | 'loan' | 'gift' | 'discounted' | 'prototype'
 
@@ -33,7 +33,7 @@ export function suggestedDisclosure({ name, provenance, lender, returnOn }: Fact
         : `${name} was bought by ${from} at the usual price.`
     case 'loan': {
       if (from === '') return null
-      const until = returnOn === null ? '' : ` until ${asDay(returnOn)}`
+      const until = returnOn === null ? '' : ` until ${day(returnOn, 'UTC')}`
       return `${name} is on loan from ${from}${until}; the lender saw nothing before this page.`
     }
     case 'gift':

@@ -1,38 +1,23 @@
-import { queryOptions } from '@tanstack/react-query'
 import { getAgreement } from '#shared/contracts/analysis.ts'
+import { getRound } from '#shared/contracts/rounds.ts'
 import { getVerdict, getVerdictDraft, listVerdicts } from '#shared/contracts/verdicts.ts'
-import { call } from '#src/lib/call.ts'
+import { ask } from '#src/lib/ask.ts'
 
 export interface AtRound {
   panel: string
   round: string
 }
 
-export const verdictsQuery = queryOptions({
-  queryKey: ['verdicts'],
-  queryFn: ({ signal }) => call(listVerdicts, { signal }),
-})
+export const verdictsQuery = ask(listVerdicts)
 
 /** A published verdict; without a version, the present one. */
 export const verdictQuery = (slug: string, version?: number) =>
-  queryOptions({
-    queryKey: ['verdicts', slug, version ?? 'present'],
-    queryFn: ({ signal }) =>
-      call(getVerdict, { params: { slug }, query: version === undefined ? {} : { version }, signal }),
-  })
+  ask(getVerdict, { params: { slug }, query: version === undefined ? {} : { version } })
 
-/** The key of the organiser's desk, which every save answers with its new state. */
-export const draftKey = (at: AtRound) => ['verdict-draft', at.panel, at.round] as const
+export const roundQuery = (at: AtRound) => ask(getRound, { params: at })
 
-export const draftQuery = (at: AtRound) =>
-  queryOptions({
-    queryKey: draftKey(at),
-    queryFn: ({ signal }) => call(getVerdictDraft, { params: at, signal }),
-  })
+/** The organiser's desk, which every save answers with its new state. */
+export const draftQuery = (at: AtRound) => ask(getVerdictDraft, { params: at })
 
 /** The figures that the preview shows below the organiser's words. */
-export const figuresQuery = (at: AtRound) =>
-  queryOptions({
-    queryKey: ['agreement', at.panel, at.round],
-    queryFn: ({ signal }) => call(getAgreement, { params: at, signal }),
-  })
+export const figuresQuery = (at: AtRound) => ask(getAgreement, { params: at })

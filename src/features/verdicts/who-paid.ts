@@ -1,5 +1,5 @@
-import { asDay } from '#src/components/results/dates.ts'
-import { capital, inWords, listed } from '#src/components/results/figures.ts'
+import { day } from '#src/lib/dates.ts'
+import { listed, numberWord, sentenceCase } from '#src/lib/counts.ts'
 import type { Provenance } from './disclosure-wording.ts'
 
 interface Unit {
@@ -11,7 +11,7 @@ interface Unit {
 
 const from = (unit: Unit): string => {
   const lender = unit.lender ? ` from ${unit.lender}` : ''
-  const until = unit.returnOn ? ` until ${asDay(unit.returnOn)}` : ''
+  const until = unit.returnOn ? ` until ${day(unit.returnOn, 'UTC')}` : ''
   return lender + until
 }
 
@@ -33,10 +33,10 @@ export function whoPaid(units: readonly Unit[]): string[] {
   const said: string[] = []
   const bought = units.filter((unit) => unit.provenance === 'bought')
   if (bought.length === units.length && units.length > 0)
-    said.push(`All ${inWords(units.length)} units were bought.`)
+    said.push(`All ${numberWord(units.length)} units were bought.`)
   else if (bought.length > 0)
     said.push(
-      `${capital(inWords(bought.length))} of ${inWords(units.length)} units ${bought.length === 1 ? 'was' : 'were'} bought.`,
+      `${sentenceCase(numberWord(bought.length))} of ${numberWord(units.length)} units ${bought.length === 1 ? 'was' : 'were'} bought.`,
     )
   const named: [Provenance, string][] = [
     ['loan', 'on loan'],

@@ -3,12 +3,11 @@ import { useQuery } from '@tanstack/react-query'
 import { useParams, useSearchParams } from 'react-router-dom'
 import type { Reveal } from '#shared/contracts/analysis.ts'
 import { to } from '#src/app/paths.ts'
+import { Asked } from '#src/components/asked/Asked.tsx'
 import { DuskStage } from '#src/components/layout/DuskStage.tsx'
-import { ReadFailure } from '#src/components/results/ReadFailure.tsx'
 import { Button } from '#src/components/ui/Button.tsx'
 import { LinkButton } from '#src/components/ui/LinkButton.tsx'
 import { PageTitle } from '#src/components/ui/PageTitle.tsx'
-import { Waiting } from '#src/components/ui/Waiting.tsx'
 import { RevealPicture } from '../components/RevealPicture.tsx'
 import { revealQuery } from '../queries.ts'
 import { lastStep, progressAt, saidAt, stepFrom } from '../reveal-steps.ts'
@@ -72,7 +71,7 @@ export default function RevealPage() {
   const { panel = '', round = '' } = useParams()
   const query = useQuery(revealQuery({ panel, round }))
   const leave = to('agreement', { panel, round })
-  if (query.isSuccess) return <Stage reveal={query.data} leave={leave} />
+  if (query.data) return <Stage reveal={query.data} leave={leave} />
   return (
     <DuskStage
       head={
@@ -82,16 +81,9 @@ export default function RevealPage() {
       }
       foot={<LinkButton to={leave}>Back to the round</LinkButton>}
     >
-      {query.isPending ? (
-        <Waiting label="Fetching what the room will see" />
-      ) : (
-        <ReadFailure
-          error={query.error}
-          what="The reveal could not be read."
-          onRetry={() => void query.refetch()}
-          retrying={query.isRefetching}
-        />
-      )}
+      <Asked query={query} waiting="Fetching what the room will see">
+        {() => null}
+      </Asked>
     </DuskStage>
   )
 }
