@@ -22,7 +22,7 @@ export function faultsOf(errors: FieldErrors, prefix = ''): Fault[] {
 
 /** What the server said that no single input can show. */
 export interface Unplaced {
-  faults: Fault[]
+  left: Fault[]
   problem: CallError | null
 }
 
@@ -39,5 +39,5 @@ export function placeFaults<T extends FieldValues>(
   const told = Object.entries(error.fields).map(([field, message]) => ({ field, message }))
   for (const { field, message } of told)
     if (has(field)) setError(field as Path<T>, { type: 'server', message })
-  return { faults: told.filter(({ field }) => !has(field)), problem: told.length === 0 ? error : null }
+  return { left: told.filter(({ field }) => !has(field)), problem: told.length === 0 ? error : null }
 }

@@ -13,7 +13,7 @@ interface ContractForm<In extends FieldValues, Out extends FieldValues> {
   has?: (field: string) => boolean
 }
 
-const nothingLeft: Unplaced = { faults: [], problem: null }
+const nothingLeft: Unplaced = { left: [], problem: null }
 
 /**
  * A form over a contract's body: faults found here or by the server stand at their inputs and in the summary, and what
@@ -27,25 +27,25 @@ export function useContractForm<In extends FieldValues, Out extends FieldValues>
 }: ContractForm<In, Out>) {
   const resolver = useMemo(() => zodResolver<In, unknown, Out>(schema as never), [schema])
   const form = useForm<In, unknown, Out>({ resolver, defaultValues, shouldFocusError: false })
-  const [left, setLeft] = useState<Unplaced>(nothingLeft)
+  const [unplaced, setUnplaced] = useState<Unplaced>(nothingLeft)
   const [attempt, setAttempt] = useState(0)
   const again = () => setAttempt((count) => count + 1)
   const submit = form.handleSubmit(async (value) => {
-    setLeft(nothingLeft)
+    setUnplaced(nothingLeft)
     try {
       await send(value)
     } catch (error) {
-      setLeft(placeFaults(error, form.setError, has))
+      setUnplaced(placeFaults(error, form.setError, has))
       again()
     }
   }, again)
-  const faults: Fault[] = [...faultsOf(form.formState.errors), ...left.faults]
+  const faults: Fault[] = [...faultsOf(form.formState.errors), ...unplaced.left]
   return {
     form,
     submit,
     attempt,
     faults,
-    problem: left.problem,
+    problem: unplaced.problem,
     busy: form.formState.isSubmitting,
     /** The fault at one input, for its `error`. */
     errorAt: (field: string): string | undefined => faults.find((fault) => fault.field === field)?.message,
