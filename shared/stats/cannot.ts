@@ -7,6 +7,7 @@ export const REASONS = [
   'fewer-than-two-complete-listeners',
   'fewer-than-three-listeners',
   'fewer-than-two-units',
+  'fewer-than-three-units',
   'fewer-than-four-units',
   'fewer-than-two-scores',
   'no-pair-of-scores',

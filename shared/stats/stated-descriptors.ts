@@ -15,7 +15,7 @@ export interface StatedDescriptor {
 
 /**
  * Which descriptors a verdict may state: the primary one that the plan names, and those others whose test of units
- * survives Holm over the rest of the scorecard at .05. All else is a hint: ten descriptors without any difference show
+ * survives Holm over the whole scorecard at .05. All else is a hint: ten descriptors without any difference show
  * "some difference" in 40 % of rounds.
  *
  * @param primary name of the descriptor frozen as primary, or null
@@ -29,7 +29,7 @@ export function statedDescriptors(
     const test = model && !isCannot(model) && !isCannot(model.unitTest) ? model.unitTest.p : undefined
     return { descriptor, p: test, isPrimary: descriptor === primary }
   })
-  const family = tests.filter(({ isPrimary, p }) => !isPrimary && p !== undefined)
+  const family = tests.filter(({ p }) => p !== undefined)
   const adjusted = holm(family.map(({ p }) => p ?? 1))
   return tests.map(({ descriptor, p, isPrimary }) => {
     const place = family.findIndex((test) => test.descriptor === descriptor)

@@ -23,6 +23,8 @@ export interface ReducedData {
   /** Fixed effects: units, then one column for each position but the first. */
   readonly columns: number
   readonly blocks: readonly Block[]
+  /** Block of each listener. */
+  readonly member: Int32Array
   readonly observations: number
   readonly cells: number
   readonly listeners: number
@@ -37,16 +39,15 @@ export interface ReducedData {
 
 /** Sums a table to blocks, without position. Cost: linear in cells, and cells² for each listener. */
 export function reduceCells(table: CellTable, centre: Float64Array, scale: number): ReducedData {
-  const groups = new Map<string, MutableBlock>()
+  const groups = new Groups()
   let cells = 0
   let observations = 0
   let within = 0
   for (let listener = 0; listener < table.listeners; listener++) {
     const units = unitsOf(table, listener)
-    if (units.length === 0) continue
     const servings = units.map((unit) => table.count[listener * table.units + unit]!)
     const y = units.map((unit) => (table.mean[listener * table.units + unit]! - centre[unit]!) / scale)
-    addTo(groups, `${units.join()}|${servings.join()}`, units, servings, null, y)
+    groups.add(`${units.join()}|${servings.join()}`, units, servings, null, y)
     cells += units.length
     for (const n of servings) observations += n
     within += table.within[listener]!
@@ -54,7 +55,8 @@ export function reduceCells(table: CellTable, centre: Float64Array, scale: numbe
   return {
     units: table.units,
     columns: table.units,
-    blocks: [...groups.values()],
+    blocks: groups.blocks,
+    member: Int32Array.from(groups.member),
     observations,
     cells,
     listeners: table.listeners,
@@ -99,7 +101,7 @@ export function reduceWithPosition(
       }
     }
   })
-  const groups = new Map<string, MutableBlock>()
+  const groups = new Groups()
   for (let listener = 0; listener < table.listeners; listener++) {
     const units = unitsOf(table, listener)
     const base = listener * table.units
@@ -108,12 +110,17 @@ export function reduceWithPosition(
     const position = Float64Array.from(
       units.flatMap((unit) => [...share.subarray((base + unit) * extra, (base + unit + 1) * extra)]),
     )
-    addTo(groups, `${units.join()}|${servings.join()}|${position.join()}`, units, servings, position, y)
+    groups.add(`${units.join()}|${servings.join()}|${position.join()}`, units, servings, position, y)
   }
-  return { ...plain, columns, blocks: [...groups.values()], withinXY, withinXX }
+  return {
+    ...plain,
+    columns,
+    blocks: groups.blocks,
+    member: Int32Array.from(groups.member),
+    withinXY,
+    withinXX,
+  }
 }
-
-type MutableBlock = { -readonly [K in keyof Block]: Block[K] }
 
 const unitsOf = (table: CellTable, listener: number): number[] => {
   const units: number[] = []
@@ -122,28 +129,31 @@ const unitsOf = (table: CellTable, listener: number): number[] => {
   return units
 }
 
-function addTo(
-  groups: Map<string, MutableBlock>,
-  key: string,
-  units: number[],
-  servings: number[],
-  position: Float64Array | null,
-  y: number[],
-): void {
-  let block = groups.get(key)
-  if (!block) {
-    block = {
-      size: 0,
-      unit: Int32Array.from(units),
-      servings: Float64Array.from(servings),
-      position,
-      sum: new Float64Array(units.length),
-      products: new Float64Array(units.length ** 2),
+class Groups {
+  readonly blocks: { -readonly [K in keyof Block]: Block[K] }[] = []
+  readonly member: number[] = []
+  readonly #places = new Map<string, number>()
+
+  /** Puts the next listener into the block of his design. */
+  add(key: string, units: number[], servings: number[], position: Float64Array | null, y: number[]): void {
+    let place = this.#places.get(key)
+    if (place === undefined) {
+      place = this.blocks.length
+      this.#places.set(key, place)
+      this.blocks.push({
+        size: 0,
+        unit: Int32Array.from(units),
+        servings: Float64Array.from(servings),
+        position,
+        sum: new Float64Array(units.length),
+        products: new Float64Array(units.length ** 2),
+      })
     }
-    groups.set(key, block)
+    const block = this.blocks[place]!
+    block.size++
+    addListener(block, y, 1)
+    this.member.push(place)
   }
-  block.size++
-  addListener(block, y, 1)
 }
 
 /** Adds (sign 1) or takes out (sign −1) one listener's cell means. */

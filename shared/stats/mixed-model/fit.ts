@@ -35,28 +35,23 @@ export interface MixedFit {
  * Sources: Patterson & Thompson 1971 (REML); Kenward & Roger 1997. Cost: linear in listeners, cells² each, and one
  * block for all listeners with the same design.
  *
- * @param scores one descriptor's scores
- * @param table the same scores as cells
- * @param position adjust for position as a factor
- * @param start ratios to start from, where a near-by fit is known
+ * @param table one descriptor's scores as cells
+ * @param withPosition the scores themselves, where position is to be adjusted for as a factor
  */
-export function fitMixedModel(
-  scores: Scores,
-  table: CellTable,
-  position: boolean,
-  start?: readonly number[],
-): MixedFit | Cannot {
+export function fitMixedModel(table: CellTable, withPosition: Scores | null = null): MixedFit | Cannot {
   if (table.listeners < 2) return cannot(table.listeners === 0 ? 'no-ratings' : 'fewer-than-two-listeners')
   if (table.units < 2) return cannot('fewer-than-two-units')
   const { centre, scale } = centring(table)
   if (scale === 0) return cannot('no-variation-left')
-  const positions = position ? scores.positions : 1
+  const positions = withPosition?.positions ?? 1
   const data =
-    positions > 1 ? reduceWithPosition(scores, table, centre, scale) : reduceCells(table, centre, scale)
-  return fitReduced(data, hasRepeats(table), positions, start)
+    withPosition && positions > 1
+      ? reduceWithPosition(withPosition, table, centre, scale)
+      : reduceCells(table, centre, scale)
+  return fitReduced(data, hasRepeats(table), positions)
 }
 
-/** The same for data already reduced. */
+/** The same for data already reduced, from known ratios near by where there are some. */
 export function fitReduced(
   data: ReducedData,
   hasInteraction: boolean,
