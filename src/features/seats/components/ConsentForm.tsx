@@ -7,8 +7,8 @@ import type { BodyOf } from '#shared/contracts/endpoint.ts'
 import { Button } from '#src/components/ui/Button.tsx'
 import { CheckRow } from '#src/components/ui/CheckRow.tsx'
 import { call } from '#src/lib/call.ts'
-import { placeFaults } from '#src/lib/form-faults.ts'
 import { seatQuery } from '../queries.ts'
+import { unplaced } from '../unplaced.ts'
 import { CallFailure } from './CallFailure.tsx'
 import { Cautions } from './Cautions.tsx'
 import { LeaveButton } from './LeaveButton.tsx'
@@ -16,24 +16,20 @@ import { ScreenTitle } from './ScreenTitle.tsx'
 import { SeatFrame } from './SeatFrame.tsx'
 
 type Consent = BodyOf<typeof giveConsent>
-type Typed = { version: typeof consentVersion; adult: boolean }
 
 /** Asked once. What is agreed to stands above the verb; only adults take part. */
 export function ConsentForm({ seat }: { seat: PanelistSeat }) {
   const client = useQueryClient()
   const formId = useId()
   const [problem, setProblem] = useState<unknown>(null)
-  const form = useForm<Typed, unknown, Consent>({
+  const form = useForm<Consent>({
     resolver: zodResolver(giveConsent.body),
-    defaultValues: { version: consentVersion, adult: false },
+    defaultValues: { version: consentVersion },
   })
   const agree = useMutation({
     mutationFn: (body: Consent) => call(giveConsent, { params: { seat: seat.id }, body }),
     onSuccess: (now) => client.setQueryData(seatQuery(seat.id).queryKey, now),
-    onError: (error) => {
-      const { left, problem: whole } = placeFaults(error, form.setError, (name) => name === 'adult')
-      setProblem(left.length > 0 ? error : whole)
-    },
+    onError: (error) => setProblem(unplaced(error, form.setError, (field) => field === 'adult')),
   })
   const published = seat.publishesRows
     ? 'Your ratings are published by listener number, never by name. People who were in the room tonight could still recognise a row.'

@@ -1,8 +1,9 @@
 import type { Descriptor } from '#shared/contracts/scorecard.ts'
 import type { Submission } from '#shared/contracts/seats.ts'
+import type { Answer } from '#src/components/rating/answer.ts'
 
-/** An answer to one line: a value on the line's scale, or "can't tell". A line without an answer has no entry. */
-export type KeptAnswer = { value: number; cantTell: false } | { value: null; cantTell: true }
+/** A value on the line's scale, or "can't tell". A line without an answer has no entry. */
+export type KeptAnswer = Exclude<Answer, null>
 
 export interface Outbox {
   /** The idempotency key: one for each serving and code, the same in every tab and at every attempt. */
@@ -32,7 +33,7 @@ export type Place = Pick<KeptServing, 'seat' | 'serving' | 'code' | 'ordinal'>
 
 export interface Change {
   /** Answers by descriptor; null clears the line. */
-  answers?: Readonly<Record<string, KeptAnswer | null>>
+  answers?: Readonly<Record<string, Answer>>
   remark?: string
   screen?: number
 }
@@ -74,12 +75,22 @@ export const submitted = (before: KeptServing): KeptServing =>
     ? before
     : { ...before, outbox: { key: `${before.serving}.${before.code}`, state: 'queued', words: '' } }
 
+/** Puts a refused submission back into the queue, under the same key. */
+export const requeued = (before: KeptServing | undefined): KeptServing | undefined =>
+  before?.outbox?.state === 'refused'
+    ? { ...before, outbox: { ...before.outbox, state: 'queued', words: '' } }
+    : before
+
 /** The scorecard's lines that have neither a value nor "can't tell". */
 export const openLines = (scorecard: readonly Descriptor[], kept: KeptServing): Descriptor[] =>
-  scorecard.filter((line) => !kept.answers[line.key])
+  scorecard.filter((line) => kept.answers[line.key] === undefined)
 
 /** The body of a submission. */
 export const submissionOf = (kept: KeptServing): Submission => ({
-  answers: Object.entries(kept.answers).map(([descriptor, answer]) => ({ descriptor, ...answer })),
+  answers: Object.entries(kept.answers).map(([descriptor, answer]) =>
+    answer === 'cant-tell'
+      ? { descriptor, value: null, cantTell: true }
+      : { descriptor, value: answer, cantTell: false },
+  ),
   remark: kept.remark,
 })

@@ -1,5 +1,5 @@
-import type { KeepingState } from '../keeping/keeping.ts'
-import type { KeptServing } from '../keeping/kept-serving.ts'
+import type { KeepingState } from './keeping/keeping.ts'
+import type { KeptServing } from './keeping/kept-serving.ts'
 
 /** The quiet words at the foot: whether what was touched is kept, and whether it is sent. */
 export function keptWords(state: KeepingState, kept: KeptServing | undefined): string {
