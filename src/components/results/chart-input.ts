@@ -39,8 +39,8 @@ const meanOf = (values: readonly number[]): number | null =>
 
 /** Everybody who rated anything on this descriptor, numbers in the order of numbers. */
 export const listenersOf = (result: DescriptorResult): string[] =>
-  [...new Set(result.units.flatMap((unit) => unit.scores.map((score) => score.listener)))].sort((one, other) =>
-    one.localeCompare(other, 'en', { numeric: true }),
+  [...new Set(result.units.flatMap((unit) => unit.scores.map((score) => score.listener)))].sort(
+    (one, other) => one.localeCompare(other, 'en', { numeric: true }),
   )
 
 /** Units as threads run through them; where a listener heard a unit twice, the thread takes the mean of the two. */

@@ -13,7 +13,14 @@ const unit = (name: string, scores: [string, number][], mean: number): UnitResul
   q3: mean + 3,
   mean,
   sd: 4.2,
-  adjusted: { mean, standardError: 2.48583, df: 8.52, low: mean - 5.67, high: mean + 5.67, comparisonHalf: 2.9 },
+  adjusted: {
+    mean,
+    standardError: 2.48583,
+    df: 8.52,
+    low: mean - 5.67,
+    high: mean + 5.67,
+    comparisonHalf: 2.9,
+  },
 })
 
 /**
@@ -32,9 +39,34 @@ export const machines: DescriptorResult = {
   },
   counts: { listeners: 6, units: 3, ratings: 54, missingCells: 0, cantTell: 0 },
   units: [
-    unit('A', [['1', 52], ['1', 52.8], ['2', 51.8], ['10', 60]], 52.355556),
-    unit('B', [['1', 62.1], ['2', 59.7], ['10', 68.6]], 60.322222),
-    unit('C', [['1', 67.5], ['2', 61.5], ['10', 70.8]], 66.272222),
+    unit(
+      'A',
+      [
+        ['1', 52],
+        ['1', 52.8],
+        ['2', 51.8],
+        ['10', 60],
+      ],
+      52.355556,
+    ),
+    unit(
+      'B',
+      [
+        ['1', 62.1],
+        ['2', 59.7],
+        ['10', 68.6],
+      ],
+      60.322222,
+    ),
+    unit(
+      'C',
+      [
+        ['1', 67.5],
+        ['2', 61.5],
+        ['10', 70.8],
+      ],
+      66.272222,
+    ),
   ],
   agreement: {
     sentence: 'This panel cannot say how far listeners agree: only three units.',
@@ -53,9 +85,36 @@ export const machines: DescriptorResult = {
     unitTest: { f: 20.576083, df1: 2, df2: 10, p: 0.000286 },
   },
   pairs: [
-    { a: 'A', b: 'B', difference: -7.966667, standardError: 2.176975, df: 10, low: -13.93, high: -2, p: 0.0111 },
-    { a: 'A', b: 'C', difference: -13.916667, standardError: 2.176975, df: 10, low: -19.88, high: -7.95, p: 0.0002 },
-    { a: 'B', b: 'C', difference: -5.95, standardError: 2.176975, df: 10, low: -11.92, high: 0.02, p: 0.0507 },
+    {
+      a: 'A',
+      b: 'B',
+      difference: -7.966667,
+      standardError: 2.176975,
+      df: 10,
+      low: -13.93,
+      high: -2,
+      p: 0.0111,
+    },
+    {
+      a: 'A',
+      b: 'C',
+      difference: -13.916667,
+      standardError: 2.176975,
+      df: 10,
+      low: -19.88,
+      high: -7.95,
+      p: 0.0002,
+    },
+    {
+      a: 'B',
+      b: 'C',
+      difference: -5.95,
+      standardError: 2.176975,
+      df: 10,
+      low: -11.92,
+      high: 0.02,
+      p: 0.0507,
+    },
   ],
   sentence: 'C is rated higher than A; difference 13.92, between 7.95 and 19.88.',
   stated: 'primary',
@@ -65,7 +124,13 @@ export const machines: DescriptorResult = {
 /** A descriptor about which nothing can be said: one listener, one unit rated, the other not. */
 export const unsaid: DescriptorResult = {
   ...machines,
-  descriptor: { ...machines.descriptor, key: 'warmth', name: 'Warmth', family: 'tonal-balance', sided: 'two' },
+  descriptor: {
+    ...machines.descriptor,
+    key: 'warmth',
+    name: 'Warmth',
+    family: 'tonal-balance',
+    sided: 'two',
+  },
   counts: { listeners: 1, units: 2, ratings: 1, missingCells: 1, cantTell: 1 },
   units: [
     { ...unit('A', [['1', 52]], 52), adjusted: null, sd: null },
