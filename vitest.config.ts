@@ -27,6 +27,7 @@ export default defineConfig({
         test: {
           name: 'component',
           environment: 'jsdom',
+          testTimeout: 20_000,
           include: browserCode,
           setupFiles: ['tests/support/component-setup.ts'],
         },
