@@ -109,7 +109,8 @@ export interface IccFromModel {
   readonly varianceComponents: {
     readonly unit: number
     readonly panelist: number
-    readonly 'panelist:unit'?: number
+    /** Cannot be said where nothing came back: it is then part of the residual. */
+    readonly 'panelist:unit': Figure
     readonly residual: number
   }
 }
@@ -138,7 +139,8 @@ export interface Model {
   readonly remlCriterion: number
   readonly varianceComponents: {
     readonly panelist: number
-    readonly 'panelist:unit'?: number
+    /** Cannot be said where nothing came back: it is then part of the residual. */
+    readonly 'panelist:unit': Figure
     readonly residual: number
   }
   /** Components estimated at zero; they stay in the model. */

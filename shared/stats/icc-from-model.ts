@@ -43,7 +43,7 @@ export function iccFromModel(
     ? { low: shroutFleiss.low, high: shroutFleiss.high }
     : isCannot(fixed)
       ? {}
-      : limitsFromComponents(table, fixed, single)
+      : limitsFromComponents(fixed, single)
   const low = limits.low === undefined ? undefined : Math.min(limits.low, single)
   const high = limits.high === undefined ? undefined : Math.max(limits.high, single)
   const ratio = noise / (panelist + interaction + residual)
@@ -66,7 +66,7 @@ export function iccFromModel(
     varianceComponents: {
       unit,
       panelist,
-      ...(random.interaction === undefined ? {} : { 'panelist:unit': random.interaction }),
+      'panelist:unit': random.interaction ?? cannot('no-repeats'),
       residual,
     },
   }
@@ -90,11 +90,7 @@ function noiseOfMean(table: CellTable, { panelist, interaction = 0, residual }: 
   return ((panelist + interaction) * listeners + residual * servings) / table.units
 }
 
-function limitsFromComponents(
-  table: CellTable,
-  fit: MixedFit,
-  single: number,
-): { low?: number; high?: number } {
+function limitsFromComponents(fit: MixedFit, single: number): { low?: number; high?: number } {
   const { panelist, interaction, residual, data } = fit
   const units = data.units
   const wald = unadjustedF(fit)
