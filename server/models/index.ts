@@ -7,6 +7,7 @@ import { initEndAnswer } from './end-answer.ts'
 import { initIdempotentAnswer } from './idempotent-answer.ts'
 import { initImportedRating } from './imported-rating.ts'
 import { initIncident } from './incident.ts'
+import { initJob } from './job.ts'
 import { initKeyEntry } from './key-entry.ts'
 import { initKeyLetter } from './key-letter.ts'
 import { initKeyListener } from './key-listener.ts'
@@ -28,6 +29,7 @@ import { initSubmission } from './submission.ts'
 import { initTagMark } from './tag-mark.ts'
 import { initUnit } from './unit.ts'
 import { initUser } from './user.ts'
+import { initUserToken } from './user-token.ts'
 import { initVerdict } from './verdict.ts'
 import { initVerdictDraft } from './verdict-draft.ts'
 
@@ -42,6 +44,7 @@ export function initModels(sequelize: Sequelize): void {
     initIdempotentAnswer,
     initImportedRating,
     initIncident,
+    initJob,
     initKeyEntry,
     initKeyLetter,
     initKeyListener,
@@ -63,6 +66,7 @@ export function initModels(sequelize: Sequelize): void {
     initTagMark,
     initUnit,
     initUser,
+    initUserToken,
     initVerdict,
     initVerdictDraft,
   ])

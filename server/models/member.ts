@@ -14,7 +14,7 @@ export class Member extends Model<InferAttributes<Member>, InferCreationAttribut
   declare userId: CreationOptional<string | null>
   declare displayName: string
   declare email: CreationOptional<string | null>
-  declare roles: CreationOptional<string>
+  declare roles: CreationOptional<string[]>
   declare createdAt: Date
   declare removedAt: CreationOptional<Date | null>
 }
@@ -27,7 +27,7 @@ export function initMember(sequelize: Sequelize): void {
       userId: { type: DataTypes.UUID },
       displayName: { type: DataTypes.TEXT, allowNull: false },
       email: { type: DataTypes.TEXT },
-      roles: { type: DataTypes.TEXT, allowNull: false, defaultValue: {} },
+      roles: { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false, defaultValue: [] },
       createdAt: { type: DataTypes.DATE, allowNull: false },
       removedAt: { type: DataTypes.DATE },
     },
