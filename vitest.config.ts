@@ -7,6 +7,8 @@ export default defineConfig({
   plugins: [react()],
   test: {
     maxWorkers: 2,
+    testTimeout: 30_000,
+    hookTimeout: 60_000,
     globalSetup: ['tests/support/global-setup.ts'],
     projects: [
       {
@@ -38,8 +40,6 @@ export default defineConfig({
           name: 'api',
           environment: 'node',
           include: ['tests/api/**/*.test.ts'],
-          testTimeout: 30_000,
-          hookTimeout: 60_000,
         },
       },
       {

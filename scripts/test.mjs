@@ -2,7 +2,7 @@
  * npm test: from a fresh clone to `N passed, N failed`. `npm test -- unit api` runs the stages named. PostgreSQL
  * is a throw-away cluster of this run's own; nothing but Node's modules may be imported here.
  */
-import { mkdtempSync, rmSync } from 'node:fs'
+import { mkdirSync, mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { holdThrowAwayFolder, joinThrowAwayCluster, projectRoot, removeThrowAway } from './postgres.mjs'
@@ -41,7 +41,8 @@ function chosenStages(names) {
 
 async function prepare(chosen) {
   requireNode()
-  await withLock(join(projectRoot, '.packages.lock'), () => ensurePackages(projectRoot, say))
+  mkdirSync(join(projectRoot, '.scrim'), { recursive: true, mode: 0o711 })
+  await withLock(join(projectRoot, '.scrim', 'prepare.lock'), () => ensurePackages(projectRoot, say))
   if (chosen.some(({ browser }) => browser)) await ensureChromium(say)
   if (!chosen.some(({ database }) => database)) return {}
   place.cluster = await holdThrowAwayFolder()
@@ -56,7 +57,8 @@ async function main() {
   if (process.env.npm_lifecycle_event) {
     setInterval(() => process.ppid !== parent && stop(1), 500).unref()
   }
-  const env = { ...process.env, ...(await prepare(chosen)) }
+  const plain = process.stdout.isTTY ? {} : { NO_COLOR: '1' }
+  const env = { ...process.env, ...plain, ...(await prepare(chosen)) }
   place.reports = mkdtempSync(join(tmpdir(), 'scrim-reports-'))
 
   const total = { passed: 0, failed: 0 }

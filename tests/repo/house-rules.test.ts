@@ -23,10 +23,10 @@ describe('source files', () => {
     expect(code.filter((path) => vague.test(path))).toEqual([])
   })
 
-  it('leave nothing for later, and switch off no check but a named one of markup', () => {
+  it('leave nothing for later, and switch off no check but a named one of markup or hooks', () => {
     const mark = new RegExp(['TO' + 'DO', 'FIX' + 'ME', '@ts-' + '(ignore|nocheck)'].join('|'))
     const off = new RegExp('eslint-' + 'disable(-next-line|-line)?(.*)', 'g')
-    const named = /^ (jsx-a11y\/[\w-]+,? ?)+(--.*)?(\*\/\}?)?$/
+    const named = /^ ((jsx-a11y|react-hooks)\/[\w-]+,? ?)+(--.*)?(\*\/\}?)?$/
     const faulty = code.filter((path) => {
       const source = text(path)
       return (
