@@ -1,6 +1,6 @@
 import { hmac } from '@noble/hashes/hmac.js'
 import { sha256 } from '@noble/hashes/sha2.js'
-import { concatBytes, hexToBytes, utf8ToBytes } from '@noble/hashes/utils.js'
+import { hexToBytes, utf8ToBytes } from '@noble/hashes/utils.js'
 
 /** A cryptographic stream of randomness; every value depends on the seed, the label and what was taken before. */
 export type Stream = {
@@ -40,7 +40,7 @@ export function createStream(seed: Uint8Array | string, label: string): Stream {
   const key = seedBytes(seed)
   if (label === '' || label.includes('\0'))
     throw new RangeError('a label has at least one character and no NUL')
-  const prefix = utf8ToBytes(`scrim-stream-1\0${label}\0`)
+  const keyed = hmac.create(sha256, key).update(utf8ToBytes(`scrim-stream-1\0${label}\0`))
   let counter = 0
   let block = new Uint8Array(0)
   let used = 0
@@ -49,7 +49,7 @@ export function createStream(seed: Uint8Array | string, label: string): Stream {
     const out = new Uint8Array(count)
     for (let filled = 0; filled < count;) {
       if (used === block.length) {
-        block = hmac(sha256, key, concatBytes(prefix, counterBytes(counter)))
+        block = keyed.clone().update(counterBytes(counter)).digest()
         counter += 1
         used = 0
       }
