@@ -111,7 +111,7 @@ export const layers = [
     may: [
       /^src\/features\/:own\//,
       /^src\/(components|hooks|lib|styles)\//,
-      /^src\/app\/paths\.ts$/,
+      /^src\/app\/(paths\.ts|RoundSelvedge\.tsx)$/,
       /^shared\//,
       packages,
     ],
