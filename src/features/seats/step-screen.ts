@@ -51,10 +51,3 @@ const ordinals = ['first', 'second', 'third', 'fourth', 'fifth', 'sixth', 'seven
 
 /** "first", "second" … for a sentence; beyond eight "number 9". */
 export const ordinalWord = (ordinal: number): string => ordinals[ordinal - 1] ?? `number ${ordinal}`
-
-/** Minutes and seconds until an instant, "1:20"; null once it has passed. Both in milliseconds. */
-export function untilWords(until: number, now: number): string | null {
-  const seconds = Math.ceil((until - now) / 1000)
-  if (seconds <= 0) return null
-  return `${Math.floor(seconds / 60)}:${String(seconds % 60).padStart(2, '0')}`
-}

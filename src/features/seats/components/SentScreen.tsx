@@ -1,25 +1,13 @@
-import { useEffect, useMemo, useState, type ReactNode } from 'react'
+import type { ReactNode } from 'react'
 import type { PanelistSeat } from '#shared/contracts/seats.ts'
+import { useServerClock } from '#src/hooks/useServerClock.ts'
 import { numberWord } from '#src/lib/counts.ts'
-import { nextServing, ordinalWord, untilWords } from '../step-screen.ts'
+import { untilWords } from '#src/lib/until-words.ts'
+import { nextServing, ordinalWord } from '../step-screen.ts'
 import { HandOverLinks } from './HandOver.tsx'
 import { LeaveButton } from './LeaveButton.tsx'
 import { ScreenTitle } from './ScreenTitle.tsx'
 import { SeatFrame } from './SeatFrame.tsx'
-
-/** Ticks once a second while a time is awaited; the difference to the server's clock is taken when its answer came. */
-function useRest(until: string | null, serverTime: string): string | null {
-  const [now, setNow] = useState(() => Date.now())
-  const ahead = useMemo(() => Date.parse(serverTime) - Date.now(), [serverTime])
-  const words = until === null ? null : untilWords(Date.parse(until), now + ahead)
-  const running = words !== null
-  useEffect(() => {
-    if (!running) return
-    const timer = setInterval(() => setNow(Date.now()), 1000)
-    return () => clearInterval(timer)
-  }, [running])
-  return words
-}
 
 /** The serving is with the server: rest, then the others, then the next one. */
 export function SentScreen({
@@ -31,7 +19,8 @@ export function SentScreen({
   notices: ReactNode
   kept: ReactNode
 }) {
-  const rest = useRest(seat.restUntil, seat.serverTime)
+  const now = useServerClock(seat.serverTime, seat.restUntil !== null)
+  const rest = seat.restUntil === null ? null : untilWords(Date.parse(seat.restUntil), now)
   const next = nextServing(seat)
   return (
     <SeatFrame seat={seat} kept={kept}>

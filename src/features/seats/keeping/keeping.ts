@@ -2,6 +2,7 @@ import {
   changed,
   keptId,
   keptStart,
+  requeued,
   submitted,
   type Change,
   type KeptServing,
@@ -165,10 +166,7 @@ export function createKeeping({ open, send, tell }: Means): Keeping {
     },
     flush,
     async retry(id) {
-      await write(
-        id,
-        (before) => before?.outbox && { ...before, outbox: { ...before.outbox, state: 'queued', words: '' } },
-      )
+      await write(id, requeued)
       await flush()
     },
     discard: (id) => write(id, () => undefined),
