@@ -18,6 +18,7 @@ const variables = z.object({
   SCRIM_ADDRESS: optional(z.url({ protocol: /^https?$/ })),
   SCRIM_SECRET: z.string().regex(/^[0-9a-f]{64}$/, '32 bytes as hex'),
   SCRIM_LAN: flag,
+  SCRIM_SIGN_UP: z.enum(['closed', 'open']).default('closed'),
   SCRIM_PROXIES: z.coerce.number().int().min(0).max(10).default(0),
   SCRIM_LOG: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('warn'),
   SMTP_URL: optional(z.url({ protocol: /^smtps?$/ })),
@@ -42,6 +43,8 @@ export interface Env {
   secret: string
   /** Whether phones of the local network may come. */
   lan: boolean
+  /** Whether anybody who comes may make an account; the demo is always open, and the first organiser needs no leave. */
+  openSignUp: boolean
   /** How many proxies stand in front, for the caller's true address. */
   proxies: number
   logLevel: 'fatal' | 'error' | 'warn' | 'info' | 'debug' | 'silent'
@@ -73,6 +76,7 @@ export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
     tls: address.startsWith('https:'),
     secret: env.SCRIM_SECRET,
     lan: env.SCRIM_LAN,
+    openSignUp: env.SCRIM_MODE === 'demo' || env.SCRIM_SIGN_UP === 'open',
     proxies: env.SCRIM_PROXIES,
     logLevel: env.SCRIM_LOG,
     smtp: env.SMTP_URL

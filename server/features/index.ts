@@ -1,4 +1,7 @@
 import type { Feature } from '../http/feature.ts'
+import { account } from './account/routes.ts'
+import { demo } from './demo/routes.ts'
+import { panels } from './panels/routes.ts'
 import { rounds } from './rounds/routes.ts'
 
-export const features: readonly Feature[] = [rounds]
+export const features: readonly Feature[] = [account, demo, panels, rounds]

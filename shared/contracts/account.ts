@@ -22,6 +22,8 @@ export const signUp = z.strictObject({
   password,
   panelName: line(limits.name, 'Name your panel.'),
   timeZone: z.string().max(64).default('UTC'),
+  /** What the first organiser's one-time address carries; empty otherwise. */
+  first: z.string().max(100).default(''),
 })
 export const signIn = z.strictObject({
   email: emailAddress,
