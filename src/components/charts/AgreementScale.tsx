@@ -24,7 +24,7 @@ export function AgreementScale({ estimate, low, high, family, ends = true, label
   const x = scaleLinear([0, 1], [7, width - 7]).clamp(true)
   const y = 12
   return (
-    <div ref={ref} data-family={family}>
+    <div ref={ref} className="agreement-scale" data-family={family}>
       <svg
         className="chart-svg"
         width={width}
@@ -54,5 +54,15 @@ export function AgreementScale({ estimate, low, high, family, ends = true, label
         )}
       </svg>
     </div>
+  )
+}
+
+/** The ends, said once over a column of scales whose own ends are off. */
+export function AgreementEnds() {
+  return (
+    <span className="flex justify-between gap-4 text-13">
+      <span>chance</span>
+      <span>as one</span>
+    </span>
   )
 }

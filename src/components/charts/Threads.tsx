@@ -31,7 +31,7 @@ export function Threads({ family, scale, units, listeners, decimals = 0, own, ..
   const ordered = [...units].sort((a, b) => a.mean - b.mean)
   const said =
     shown === null
-      ? 'Point at a thread, or use the arrow keys, to follow one listener.'
+      ? 'Point at a thread, touch it, or use the arrow keys, to follow one listener.'
       : `${listeners[shown]}: ${ordered
           .map((unit) => {
             const score = unit.scores[shown]
@@ -77,9 +77,9 @@ export function Threads({ family, scale, units, listeners, decimals = 0, own, ..
         return (
           <>
             {/* One stop in the tab order; arrows walk through the threads and the line below says them. */}
-            {/* eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex, jsx-a11y/no-noninteractive-element-interactions */}
             <div
               role="group"
+              // eslint-disable-next-line jsx-a11y/no-noninteractive-tabindex
               tabIndex={0}
               aria-label={`${words.title}: threads of ${listeners.length} listeners, arrow keys follow one`}
               {...keys}

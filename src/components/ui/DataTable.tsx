@@ -7,6 +7,8 @@ import { SelectField } from './SelectField.tsx'
 export interface Column<Row> {
   key: string
   header: string
+  /** What stands in the column's head instead of the plain name, where that is a picture's ends or a sign. */
+  head?: ReactNode
   cell: (row: Row) => ReactNode
   /** Numbers stand at the right, digits under digits. */
   numeric?: boolean
@@ -70,7 +72,7 @@ export function DataTable<Row>(props: DataTableProps<Row>) {
                   )}
                 </button>
               ) : (
-                column.header
+                (column.head ?? column.header)
               )}
             </th>
           ))}

@@ -41,30 +41,33 @@ export function NumberInSentence({
   }
 
   return (
-    <span className="number-in-sentence">
-      <input
-        id={id}
-        type="text"
-        inputMode={step % 1 === 0 ? 'numeric' : 'decimal'}
-        autoComplete="off"
-        aria-label={label}
-        aria-invalid={good ? undefined : true}
-        aria-describedby={good ? undefined : `${id}-limits`}
-        disabled={disabled}
-        style={{ width: `${Math.max(2, text.length) + 1}ch` }}
-        value={text}
-        onFocus={(event) => event.target.select()}
-        onChange={(event) => take(event.target.value)}
-        onBlur={() => setDraft(null)}
-        onKeyDown={(event) => {
-          const by = { ArrowUp: step, ArrowDown: -step }[event.key]
-          if (by === undefined) return
-          event.preventDefault()
-          const next = Math.min(max, Math.max(min, Number((value + by).toFixed(6))))
-          setDraft(null)
-          onChange(next)
-        }}
-      />
+    <span>
+      <span className="number-in-sentence">
+        <input
+          id={id}
+          type="text"
+          inputMode={step % 1 === 0 ? 'numeric' : 'decimal'}
+          autoComplete="off"
+          aria-label={label}
+          aria-invalid={good ? undefined : true}
+          aria-describedby={good ? undefined : `${id}-limits`}
+          disabled={disabled}
+          style={{ width: `calc(${Math.max(2, text.length)}ch + 0.3em)` }}
+          value={text}
+          onFocus={(event) => event.target.select()}
+          onChange={(event) => take(event.target.value)}
+          onBlur={() => setDraft(null)}
+          onKeyDown={(event) => {
+            const by = { ArrowUp: step, ArrowDown: -step }[event.key]
+            if (by === undefined) return
+            event.preventDefault()
+            const next = Math.min(max, Math.max(min, Number((value + by).toFixed(6))))
+            setDraft(null)
+            onChange(next)
+          }}
+        />
+        <span className="number-in-sentence-line" aria-hidden="true" />
+      </span>
       {!good && (
         <span id={`${id}-limits`} role="status" className="number-in-sentence-error">
           {' '}

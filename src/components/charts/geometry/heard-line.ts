@@ -73,10 +73,12 @@ export function layOutHeardLine(rows: HeardRow[], scale: HeardScale, width: numb
   )
   const top = lines * 19 + 8
   let y = top
-  const laid = rows.map((row) => {
+  const stacks = rows.map((row) => {
     const xs = row.scores.map((score) => x(score))
-    const levels = dodge(xs, 2.6)
-    const above = 7 + TICK + Math.max(0, ...levels) * TICK_STEP
+    return { xs, levels: dodge(xs, 2.6) }
+  })
+  const above = 7 + TICK + Math.max(0, ...stacks.flatMap((stack) => stack.levels)) * TICK_STEP
+  const laid = stacks.map(({ xs, levels }) => {
     const nameY = narrow ? y + 17 : 0
     if (narrow) y += 24
     const line = y + Math.max(20, above + 4)

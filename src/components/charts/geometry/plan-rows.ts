@@ -41,7 +41,7 @@ export function layOutPlan(rows: PlanRow[], turns: number, width: number): PlanL
   const pitch = (width - left) / Math.max(1, turns)
   const cellWidth = Math.min(pitch - 8, 96)
   const labels = rows.flatMap((row) => row.places.flatMap((place) => place.label ?? []))
-  const fits = labels.every((label) => textWidth(label, TEXT) + 8 <= cellWidth)
+  const fits = labels.every((label) => textWidth(label, TEXT) + 10 <= cellWidth)
   const words = fits ? new Map(labels.map((label) => [label, label])) : shortNames(labels)
   const rowHeight = narrow ? 66 : 44
   return {
