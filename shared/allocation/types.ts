@@ -61,7 +61,7 @@ export type DrawPlace = { turn: number; position: number; unit: string; codes: R
 export type DrawRow = {
   /** The number of the public file: drawn from 1…rows, spares included. */
   listener: number
-  /** The number of whoever takes the row over: drawn from rows+1…2·rows. */
+  /** The number of whoever takes the row over: `listener` + the number of rows, spares included. */
   takeoverListener: number
   spare: boolean
   places: DrawPlace[]
