@@ -37,9 +37,11 @@ export function createApp(deps: Deps, options: { pruneSessionsEvery?: number | f
   api.use(passport.session())
   api.use('/api', limited(deps.limits.write, writes))
   api.use(
-    ['/api/session', '/api/account/password', '/api/password-resets'],
-    limited(deps.limits.signIn, writes),
+    ['/api/session', '/api/account/password'],
+    limited(deps.limits.signIn, writes, { failuresOnly: true }),
   )
+  api.use('/api/password-resets', limited(deps.limits.signIn, writes))
+  api.post('/api/account', limited(deps.limits.signIn, writes))
   api.use('/api/join', limited(deps.limits.join, writes))
   api.use('/api', sameOrigin)
   const mount = mounter(api, deps)

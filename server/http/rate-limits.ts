@@ -15,16 +15,18 @@ export const usualLimits: RateLimits = {
   write: { most: 600, seconds: 60 },
 }
 
-/** A limit by network address, counted in this process. */
+/** A limit by network address, counted in this process. With `failuresOnly` whoever succeeds is not counted. */
 export const limited = (
   { most, seconds }: { most: number; seconds: number },
   counts: (method: string) => boolean,
+  { failuresOnly = false }: { failuresOnly?: boolean } = {},
 ): RequestHandler =>
   rateLimit({
     windowMs: seconds * 1000,
     limit: most,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
+    skipSuccessfulRequests: failuresOnly,
     skip: (request) => !counts(request.method),
     handler: (_request, _response, next) =>
       next(
