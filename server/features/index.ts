@@ -3,5 +3,8 @@ import { account } from './account/routes.ts'
 import { demo } from './demo/routes.ts'
 import { panels } from './panels/routes.ts'
 import { rounds } from './rounds/routes.ts'
+import { seats } from './seats/routes.ts'
+import { table } from './table/routes.ts'
+import { tags } from './tags/routes.ts'
 
-export const features: readonly Feature[] = [account, demo, panels, rounds]
+export const features: readonly Feature[] = [account, demo, panels, rounds, tags, table, seats]

@@ -1,5 +1,6 @@
 import type { Request } from 'express'
 import type { Deps } from '../deps.ts'
+import type { ApiError } from './api-error.ts'
 
 /** Who asks: a signed-in user, and the seats and duties (round roles) that links opened in this browser. */
 export interface Actor {
@@ -22,6 +23,8 @@ export interface Context {
   panelId: string | undefined
   /** Runs once the transaction has committed. */
   afterCommit(work: () => void): void
+  /** Answers with this error, yet keeps what was written: a wrong code changes nothing, but is counted. */
+  refuse(error: ApiError): never
   /** The raw request, for uploads and streams only. */
   request: Request
 }

@@ -28,6 +28,15 @@ export interface FileAnswer {
   immutable?: boolean
 }
 
+/** Thrown by `context.refuse`: the transaction commits, then the error is answered. */
+class Refusal extends Error {
+  readonly error: ApiError
+  constructor(error: ApiError) {
+    super(error.message)
+    this.error = error
+  }
+}
+
 /** Reads `If-Match: "7"`. */
 function editedVersion(endpoint: Endpoint, request: Request): number | undefined {
   if (!endpoint.versioned) return undefined
@@ -57,12 +66,13 @@ export function contextOf(
     version: editedVersion(endpoint, request),
     panelId: undefined,
     afterCommit: (work) => void waiting.push(work),
+    refuse: (error) => {
+      throw new Refusal(error)
+    },
     request,
     committed: () => waiting.forEach((work) => work()),
   }
 }
-
-const addressIn = (path: string): string => path // Express 5 reads `:name` as the contract writes it.
 
 /**
  * The one straight line of a request: session → actor → rate limit → same origin (both before this) → contract →
@@ -76,7 +86,7 @@ export function mounter(router: Router, deps: Deps): Mount {
       before.push(signedIn(endpoint.audience))
     if (endpoint.kind === 'json' && endpoint.method !== 'GET')
       before.push(express.json({ limit: endpoint.bodyLimit ?? limits.jsonBytes, strict: true }))
-    router[method](addressIn(endpoint.path), ...before, async (request: Request, response: Response) => {
+    router[method](endpoint.path, ...before, async (request: Request, response: Response) => {
       const context = contextOf(deps, endpoint, request, response)
       const input = readInput(endpoint, request)
       const repeated = endpoint.idempotent && context.idempotencyKey !== undefined
@@ -88,13 +98,18 @@ export function mounter(router: Router, deps: Deps): Mount {
       const answer = await inTransaction(deps.sequelize, { userId: context.actor.userId }, async () => {
         const before = repeated ? await answeredBefore(context, endpoint.id, digest) : undefined
         if (before !== undefined) return before
-        const made = await handler(input as never, context)
+        const made = await handler(input as never, context).catch((error: unknown) => {
+          if (error instanceof Refusal) return error
+          throw error
+        })
+        if (made instanceof Refusal) return made
         if (endpoint.kind === 'file') return made
         const read = readAnswer(endpoint, made, !deps.env.production, (message) => deps.log.error(message))
         if (repeated) await keepAnswer(context, endpoint.id, digest, read)
         return read
       })
       context.committed()
+      if (answer instanceof Refusal) throw answer.error
       if (endpoint.kind === 'file') sendFile(response, answer as FileAnswer)
       else response.set('Cache-Control', 'no-store').json(answer)
     })

@@ -6,7 +6,7 @@ import type { Context } from '#server/http/context.ts'
 import { Member } from '#server/models/member.ts'
 import { RoundRole } from '#server/models/round-role.ts'
 import { Seat } from '#server/models/seat.ts'
-import { linkAddress, linkHash, linkToken, type LinkKind } from './links.ts'
+import { linkAddress, linkHash, linkToken, type LinkKind } from './link-service.ts'
 
 const dutyNames: Record<string, string> = {
   keeper: 'Code keeper',

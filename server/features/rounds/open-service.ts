@@ -15,7 +15,7 @@ import { Seat } from '#server/models/seat.ts'
 import { Serving } from '#server/models/serving.ts'
 import { Sitting } from '#server/models/sitting.ts'
 import { Unit } from '#server/models/unit.ts'
-import { linkHash, linkToken } from './links.ts'
+import { linkHash, linkToken } from './link-service.ts'
 import { readPlan } from './plan.ts'
 
 /** Part of every plan and key: whoever repeats the draw must know which rules made it. */

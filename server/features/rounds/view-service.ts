@@ -12,7 +12,7 @@ import { Sitting } from '#server/models/sitting.ts'
 import { Verdict } from '#server/models/verdict.ts'
 import * as may from '#server/policies/round.ts'
 import type { RoundAccess } from './access-service.ts'
-import { descriptorsOf, peopleOf, turnsBySeat, unitCountOf, unitsOf } from './facts.ts'
+import { descriptorsOf, peopleOf, turnsBySeat, unitCountOf, unitsOf } from './facts-service.ts'
 import { readPlan } from './plan.ts'
 import { presentPublicRound, presentRound, type PlanFacts } from './presenter.ts'
 
