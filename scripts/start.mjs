@@ -11,7 +11,7 @@ import { ensurePackages, requireNode } from './start/install.mjs'
 import { lanNotice } from './start/lan.mjs'
 import { withLock } from './start/lock.mjs'
 import { parseOptions, usage } from './start/options.mjs'
-import { waitForPort } from './start/ports.mjs'
+import { freePort, waitForPort } from './start/ports.mjs'
 import { endChildren, pause } from './start/processes.mjs'
 import { keptSecret } from './start/secret.mjs'
 
@@ -85,7 +85,6 @@ async function main() {
   watchForTheEnd()
   console.log(`Scrim, ${options.mode}`)
   const addresses = await prepare(options)
-  const { host, port, address } = await chooseAddress(options, process.env, say)
   if (running.ending) return
   const env = {
     ...process.env,
@@ -93,22 +92,40 @@ async function main() {
     SCRIM_MODE: options.mode,
     SCRIM_SECRET: process.env.SCRIM_SECRET || keptSecret(join(state, 'secret')),
     SCRIM_LAN: options.lan ? '1' : '0',
-    SCRIM_ADDRESS: address,
   }
-  running.application = await startApplication({ root, dev: options.dev, host, port, env })
-  running.application.server.on('exit', (code) => {
-    if (!running.ending) console.error('The server ended by itself.')
-    end(code || 1)
-  })
-  if (options.lan && (await waitForPort(port, () => !running.ending))) console.log(await lanNotice(address))
+  await launch(options, env)
 }
 
-try {
-  await main()
-} catch (error) {
-  if (!running.ending) {
-    console.error(error.message)
-    if (error instanceof RangeError) process.exit(2)
-  }
-  await end(1)
+/** Chooses a port and starts the server on it; another port when somebody else was quicker to take that one. */
+async function launch(options, env, attempt = 1) {
+  const onePortAtATime = join(state, 'port.lock')
+  const { address, opened } = await withLock(onePortAtATime, async () => {
+    const { host, port, address } = await chooseAddress(options, env, say)
+    const application = await startApplication({
+      root,
+      dev: options.dev,
+      host,
+      port,
+      env: { ...env, SCRIM_ADDRESS: address },
+    })
+    running.application = application
+    const { server } = application
+    server.on('exit', async (code) => {
+      if (running.ending) return
+      const overtaken = code !== 0 && !options.dev && attempt < 4 && (await freePort(host, port)) !== port
+      if (overtaken) return launch(options, env, attempt + 1).catch(fail)
+      console.error('The server ended by itself.')
+      await end(code || 1)
+    })
+    const opened = await waitForPort(port, () => !running.ending && server.exitCode === null)
+    return { address, opened }
+  })
+  if (options.lan && opened) console.log(await lanNotice(address))
 }
+
+async function fail(error) {
+  if (!running.ending) console.error(error.message)
+  await end(error instanceof RangeError ? 2 : 1)
+}
+
+main().catch(fail)
