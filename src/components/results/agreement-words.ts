@@ -29,3 +29,7 @@ export const statedWords: Record<DescriptorResult['stated'], string> = {
   stated: 'Holds over the whole scorecard (Holm).',
   hint: 'A hint: it does not hold over the whole scorecard (Holm).',
 }
+
+/** A panel's label with what it stands on: "Small panel: at least six listeners on each unit". */
+export const labelWords = (label: { words: string; fewest: number }): string =>
+  `${label.words}: at least ${counted(label.fewest, 'listener')} on each unit`

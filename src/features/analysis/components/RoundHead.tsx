@@ -4,6 +4,7 @@ import { to } from '#src/app/paths.ts'
 import { RoundSelvedge } from '#src/app/RoundSelvedge.tsx'
 import { Code } from '#src/components/Code.tsx'
 import { FolioSection } from '#src/components/layout/Folio.tsx'
+import { labelWords } from '#src/components/results/agreement-words.ts'
 import { LinkButton } from '#src/components/ui/LinkButton.tsx'
 import { Notice } from '#src/components/ui/Notice.tsx'
 import { PageTitle } from '#src/components/ui/PageTitle.tsx'
@@ -21,7 +22,7 @@ function Labels({ agreement }: { agreement: Agreement }) {
   return (
     <>
       <p>
-        <strong>{agreement.label.words}</strong>
+        <strong>{labelWords(agreement.label)}</strong>
       </p>
       {agreement.labels.map((label) => (
         <p key={label}>{label}</p>
