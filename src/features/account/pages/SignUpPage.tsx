@@ -1,4 +1,4 @@
-import { Link, useNavigate } from 'react-router-dom'
+import { Link, useNavigate, useSearchParams } from 'react-router-dom'
 import { signUp } from '#shared/contracts/account.ts'
 import { limits } from '#shared/domain/limits.ts'
 import { to } from '#src/app/paths.ts'
@@ -17,10 +17,18 @@ const inputs = new Set(['name', 'email', 'password', 'panelName'])
 
 export default function SignUpPage() {
   const navigate = useNavigate()
+  const [search] = useSearchParams()
   const create = useSignUp()
   const { form, submit, faults, attempt, problem, busy, errorAt } = useContractForm({
     schema: signUp,
-    defaultValues: { name: '', email: '', password: '', panelName: '', timeZone: ownZone() },
+    defaultValues: {
+      name: '',
+      email: '',
+      password: '',
+      panelName: '',
+      timeZone: ownZone(),
+      first: search.get('first') ?? '',
+    },
     has: (field) => inputs.has(field),
     send: async (body) => {
       const me = await create.mutateAsync(body)

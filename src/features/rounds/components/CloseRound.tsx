@@ -20,7 +20,7 @@ export function CloseRound({ panel, round, progress }: CloseRoundProps) {
   const [asking, setAsking] = useState(false)
   const close = useCloseRound(at, round.version)
   const navigate = useNavigate()
-  const out = progress.servings.planned - progress.servings.submitted - progress.servings.void
+  const out = progress.servings.planned - progress.servings.submitted
   const anyOut = out > 0 || progress.waitingFor.length > 0
   return (
     <>
