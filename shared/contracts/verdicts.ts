@@ -8,7 +8,7 @@ import { calendarDate, fingerprint, id, instant, line, prose, slug } from './tex
 
 export const provenances = ['bought', 'loan', 'gift', 'discounted', 'prototype'] as const
 const price = z.strictObject({
-  minor: z.number().int().min(0).max(100_000_000),
+  minor: z.number().int().min(0, 'Write the price as a number, like 189 or 189.50.').max(100_000_000),
   currency: z.string().regex(/^[A-Z]{3}$/, 'Three letters, like EUR.'),
   on: calendarDate,
 })
