@@ -22,11 +22,9 @@ export async function enterSeat(context: Context, id: string): Promise<SeatAcces
   const seat = await Seat.findByPk(id)
   if (!seat || !(await isTheirs(context, seat)))
     throw notFound('This seat is not open on this phone. Scan its code again.')
-  const [round, sitting, panel] = await Promise.all([
-    Round.findByPk(seat.roundId),
-    Sitting.findByPk(seat.sittingId),
-    Panel.findByPk(seat.panelId),
-  ])
+  const round = await Round.findByPk(seat.roundId)
+  const sitting = await Sitting.findByPk(seat.sittingId)
+  const panel = await Panel.findByPk(seat.panelId)
   if (!round || !sitting || !panel) throw notFound()
   await enterScope(context, seat.panelId)
   return {

@@ -31,9 +31,8 @@ export async function openLink(context: Context, token: string): Promise<string>
   const seat = await Seat.findOne({ where: { linkHash: hash } })
   const duty = seat ? null : await RoundRole.findOne({ where: { linkHash: hash }, lock: true })
   const link = seat ?? duty
-  const [panel, round] = link
-    ? await Promise.all([Panel.findByPk(link.panelId), Round.findByPk(link.roundId)])
-    : []
+  const panel = link ? await Panel.findByPk(link.panelId) : null
+  const round = link ? await Round.findByPk(link.roundId) : null
   if (!link || !panel || !round || round.status === 'draft' || round.status === 'cancelled')
     throw notFound(unknownLink)
   const held = await heldHere(context, panel, round)

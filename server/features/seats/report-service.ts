@@ -13,11 +13,9 @@ import { enterSeat } from './access-service.ts'
 export async function ownReport(context: Context, id: string): Promise<SeatReport> {
   const { seat, round, facts } = await enterSeat(context, id)
   permit(maySeeOwnReport(facts), { detail: 'Your report is here once the round has closed.' })
-  const [ratings, { scorecard }, units] = await Promise.all([
-    countedRatings(context, round),
-    describeRound(round),
-    unitsOf(round),
-  ])
+  const ratings = await countedRatings(context, round)
+  const { scorecard } = await describeRound(round)
+  const units = await unitsOf(round)
   const mine = ratings.filter((one) => one.seatId === seat.id)
   return {
     label: seat.label,

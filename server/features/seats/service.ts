@@ -18,12 +18,10 @@ import { servingInHand, stepOf } from './step.ts'
 
 export async function viewSeat(context: Context, access: SeatAccess): Promise<PanelistSeat> {
   const { seat, round, sitting, panel, facts } = access
-  const [servings, ended, others, told] = await Promise.all([
-    servingsOf(context, seat.id),
-    EndAnswer.count({ where: { seatId: seat.id } }),
-    otherSeats(context, seat),
-    describeRound(round),
-  ])
+  const servings = await servingsOf(context, seat.id)
+  const ended = await EndAnswer.count({ where: { seatId: seat.id } })
+  const others = await otherSeats(context, seat)
+  const told = await describeRound(round)
   const stepFacts = {
     ...facts,
     turn: sitting.turn,
