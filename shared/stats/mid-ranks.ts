@@ -26,4 +26,5 @@ export function midRanks(values: readonly number[]): { ranks: number[]; ties: nu
  * @example
  * rounded((0.1 + 0.2) / 3) // => 0.1
  */
-export const rounded = (value: number): number => Number(value.toPrecision(12))
+export const rounded = (value: number): number =>
+  Number.isInteger(value * 64) ? value : Number(value.toPrecision(12))
