@@ -9,9 +9,9 @@ import { SelectField } from '#src/components/ui/SelectField.tsx'
 import { TextArea } from '#src/components/ui/TextArea.tsx'
 import { TextField } from '#src/components/ui/TextField.tsx'
 import { call } from '#src/lib/call.ts'
+import { createSameKey } from '#src/lib/same-key.ts'
 import { useContractForm } from '#src/lib/use-contract-form.ts'
 import { heldBack } from '../preview.ts'
-import { createSameKey } from '../same-key.ts'
 import { BadRows, WhatWasRead } from './Reading.tsx'
 
 interface ImportFormProps {

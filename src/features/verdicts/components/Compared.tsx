@@ -37,10 +37,12 @@ interface ComparedProps {
   units: Unit[]
   disclosures: string[]
   results: PublicVerdict['results']
+  /** Where "All disclosures" leads. */
+  anchor?: string
 }
 
 /** What was set against what: maker, how the panel got it, price with its day, liking where it was asked. */
-export function Compared({ units, disclosures, results }: ComparedProps) {
+export function Compared({ units, disclosures, results, anchor = 'compared' }: ComparedProps) {
   const liking = results.find((result) => result.descriptor.family === 'liking')
   const photos = units.filter((unit) => unit.photo !== null)
   return (
@@ -48,7 +50,7 @@ export function Compared({ units, disclosures, results }: ComparedProps) {
       label="Compared"
       note={liking ? 'Liking is what these listeners liked. It predicts nobody else’s.' : undefined}
     >
-      <div id="compared">
+      <div id={anchor}>
         <h2 className="heading mb-3">What was compared</h2>
         <DataTable
           caption="Units in this round"

@@ -18,11 +18,23 @@ interface OpeningProps {
   units: { name: string; provenance: Provenance | null; lender: string | null; returnOn: string | null }[]
   /** The preview on the organiser's desk is not a page of its own. */
   asPage?: boolean
+  /** Where "All disclosures" leads. */
+  anchor?: string
 }
 
 /** The sentence, how sure it is, and beside it who paid: before any picture. */
 export function Opening(props: OpeningProps) {
-  const { headline, title, summary, certainty, label, labels, units, asPage = true } = props
+  const {
+    headline,
+    title,
+    summary,
+    certainty,
+    label,
+    labels,
+    units,
+    asPage = true,
+    anchor = 'compared',
+  } = props
   const sentence = headline.trim() === '' ? title : headline
   const few = label.key === 'none' || label.key === 'informal'
   return (
@@ -36,7 +48,7 @@ export function Opening(props: OpeningProps) {
             <p key={line}>{line}</p>
           ))}
           <p>
-            <a href="#compared">All disclosures</a>
+            <a href={`#${anchor}`}>All disclosures</a>
           </p>
           <h3>{few ? label.words : labelWords(label)}</h3>
           {labels.map((line) => (

@@ -1,4 +1,4 @@
-import { randomKey } from '#src/lib/random-key.ts'
+import { randomKey } from './random-key.ts'
 
 /** Gives one idempotency key for as long as what is sent stays the same: a repeated press stores once. */
 export function createSameKey(fresh: () => string = randomKey): (body: unknown) => string {
