@@ -82,7 +82,7 @@ function alphaOf(units: Iterable<UnitSums>): number | Cannot {
   if (n === 0) return cannot('no-pair-of-scores')
   const total = squares - (sum * sum) / n
   if (!(total > 1e-12 * squares)) return cannot('no-variation')
-  return Math.min(1, 1 - (observed / n) * ((n - 1) / total))
+  return observed <= 1e-12 * total ? 1 : 1 - (observed / n) * ((n - 1) / total)
 }
 
 function intervalEngine(values: readonly AlphaValue[]): LeaveOut {

@@ -53,7 +53,7 @@ function fromSquares(units: readonly (readonly number[])[]): number | Cannot {
     total += squares
   }
   if (!(total > 1e-20 * n * Math.max(1e-280, centre * centre))) return cannot('no-variation')
-  return 1 - (observed / n) * ((n - 1) / total)
+  return observed <= 1e-12 * total ? 1 : 1 - (observed / n) * ((n - 1) / total)
 }
 
 function ranked(units: readonly (readonly number[])[]): number[][] {
