@@ -148,8 +148,8 @@ export function RatingLine({
           I can’t tell
         </label>
         {typeof value === 'number' && !readOnly && (
-          <button type="button" className="rating-clear" onClick={clear}>
-            clear<VisuallyHidden> {name}</VisuallyHidden>
+          <button type="button" className="rating-clear" aria-label={`clear ${name}`} onClick={clear}>
+            clear
           </button>
         )}
       </div>

@@ -16,16 +16,13 @@ interface ThreadsPictureProps {
   width: number
   lifted: number | null
   onLift: (listener: number | null) => void
-  /** How many units, from the lowest mean, have their names and threads out; all unless said (the reveal). */
-  shown?: number
 }
 
 /** The drawing of the threads: columns, one thin line per listener, the panel's line bold, names and end words. */
 export function ThreadsPicture(props: ThreadsPictureProps) {
-  const { units, scale, layout, listeners, width, lifted, onLift, shown = units.length } = props
-  const { order, y } = layout
-  const columns = layout.columns.slice(0, shown)
-  const inOrder = order.slice(0, shown).flatMap((nth) => units[nth] ?? [])
+  const { units, scale, layout, listeners, width, lifted, onLift } = props
+  const { order, columns, y } = layout
+  const inOrder = order.flatMap((nth) => units[nth] ?? [])
   const height = (score: number | null | undefined) =>
     score === null || score === undefined ? null : y(score)
   const paths = Array.from({ length: listeners }, (_, listener) =>
@@ -42,7 +39,7 @@ export function ThreadsPicture(props: ThreadsPictureProps) {
   const beside = layout.wordsBeside
   return (
     <>
-      {layout.columns.map((x) => (
+      {columns.map((x) => (
         <line key={x} className="chart-line" x1={x} x2={x} y1={layout.top} y2={layout.bottom} />
       ))}
       {scale.sided === 'two' && (
@@ -85,13 +82,11 @@ export function ThreadsPicture(props: ThreadsPictureProps) {
           }}
         />
       ))}
-      {layout.names
-        .filter((name) => name.nth < shown)
-        .map((name) => (
-          <text key={name.nth} className="chart-name-small" x={name.x} y={layout.namesY + name.line * 19}>
-            {units[order[name.nth] ?? -1]?.name}
-          </text>
-        ))}
+      {layout.names.map((name) => (
+        <text key={name.nth} className="chart-name-small" x={name.x} y={layout.namesY + name.line * 19}>
+          {inOrder[name.nth]?.name}
+        </text>
+      ))}
     </>
   )
 }

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react'
+import { Link } from 'react-router-dom'
 import { Cloth } from '../Cloth.tsx'
 import { Mark } from '../Mark.tsx'
 
@@ -13,6 +14,10 @@ export function Threshold({ children }: { children: ReactNode }) {
         </span>
       </div>
       <main id="matter" tabIndex={-1} className="threshold-matter">
+        <p className="threshold-name">
+          <Link to="/">Scrim</Link>
+          <span className="note"> Blind listening, openly reported.</span>
+        </p>
         {children}
       </main>
     </div>

@@ -21,10 +21,11 @@ export function CheckRow({ label, hint, error, id, className = '', ...input }: C
           id={own}
           type="checkbox"
           className="tick"
+          aria-labelledby={`${own}-name`}
           aria-invalid={error ? true : undefined}
           aria-describedby={described || undefined}
         />
-        <span>{label}</span>
+        <span id={`${own}-name`}>{label}</span>
         {hint && (
           <span id={`${own}-hint`} className="field-hint col-start-2">
             {hint}

@@ -70,11 +70,12 @@ export function ChoiceRows(props: OneProps | SeveralProps) {
               value={choice.value}
               checked={isChosen(choice.value)}
               disabled={Boolean(choice.disabledReason)}
+              aria-labelledby={`${id}-name-${nth}`}
               aria-invalid={props.error ? true : undefined}
               aria-describedby={choice.hint || choice.disabledReason ? `${id}-choice-${nth}` : undefined}
               onChange={(event) => choose(choice.value, event.target.checked)}
             />
-            <span>{choice.label}</span>
+            <span id={`${id}-name-${nth}`}>{choice.label}</span>
             {(choice.hint || choice.disabledReason) && (
               <span id={`${id}-choice-${nth}`} className="field-hint col-start-2">
                 {choice.disabledReason ?? choice.hint}

@@ -1,4 +1,5 @@
 import * as Radix from '@radix-ui/react-dialog'
+import { useRef } from 'react'
 import type { ReactNode } from 'react'
 import { Button, IconButton } from './Button.tsx'
 
@@ -14,11 +15,25 @@ interface DialogProps {
 
 /** A question on top of the page: from the bottom edge on a phone, high on the page elsewhere. Escape closes it. */
 export function Dialog({ open, onOpenChange, title, description, children, actions }: DialogProps) {
+  const cameFrom = useRef<Element | null>(null)
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
         <Radix.Overlay className="dialog-veil" />
-        <Radix.Content className="dialog" {...(description ? {} : { 'aria-describedby': undefined })}>
+        <Radix.Content
+          className="dialog"
+          // The question itself takes focus, so that it is heard before its verbs.
+          onOpenAutoFocus={(event) => {
+            event.preventDefault()
+            cameFrom.current = document.activeElement
+            if (event.currentTarget instanceof HTMLElement) event.currentTarget.focus()
+          }}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault()
+            if (cameFrom.current instanceof HTMLElement) cameFrom.current.focus()
+          }}
+          {...(description ? {} : { 'aria-describedby': undefined })}
+        >
           <div className="flex items-start justify-between gap-4">
             <Radix.Title className="heading">{title}</Radix.Title>
             <Radix.Close asChild>
