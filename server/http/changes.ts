@@ -32,12 +32,15 @@ export async function changeHub(databaseUrl: string, log: Logger): Promise<Chang
   let client: pg.Client | null = null
   let stopped = false
   let again: NodeJS.Timeout | undefined
+  const later = (): void => {
+    if (!stopped) again = setTimeout(() => void connect().catch(later), 1000)
+  }
   const connect = async (): Promise<void> => {
     const next = new pg.Client({ connectionString: databaseUrl, application_name: 'scrim changes' })
     next.on('error', (error) => {
       log.warn({ err: error }, 'lost the line that carries changes')
       client = null
-      if (!stopped) again = setTimeout(() => void connect().catch(() => undefined), 1000)
+      later()
     })
     next.on('notification', ({ payload }) => {
       if (payload) emitter.emit('change', JSON.parse(payload) as Change)

@@ -73,13 +73,19 @@ export function startWorker(deps: Deps, everyMs = 1000): { stop(): Promise<void>
     while (!stopped && (await runNextJob(deps)));
   }
   const work = async (): Promise<void> => {
+    let wait = everyMs
     while (!stopped) {
-      await round().catch((error: unknown) =>
-        deps.log.error({ err: error }, 'the worker could not look for jobs'),
-      )
+      try {
+        await round()
+        wait = everyMs
+      } catch (error) {
+        // The database is away: ask less and less often, at most every half minute.
+        wait = Math.min(wait * 2, 30_000)
+        deps.log.error({ err: error }, 'the worker could not look for jobs')
+      }
       if (stopped) return
       await new Promise<void>((resolve) => {
-        rest = { timer: setTimeout(resolve, everyMs), end: resolve }
+        rest = { timer: setTimeout(resolve, wait), end: resolve }
       })
     }
   }

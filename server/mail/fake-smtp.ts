@@ -1,5 +1,5 @@
 import type { AddressInfo } from 'node:net'
-import { simpleParser, type AddressObject } from 'mailparser'
+import type { AddressObject } from 'mailparser'
 import { SMTPServer } from 'smtp-server'
 import type { Message } from './mailer.ts'
 
@@ -21,7 +21,9 @@ export async function startFakeSmtp(
     disabledCommands: ['STARTTLS', 'AUTH'],
     logger: false,
     onData: (stream, _session, done) => {
-      simpleParser(stream)
+      // The parser is large, and most starts read no mail.
+      import('mailparser')
+        .then(({ simpleParser }) => simpleParser(stream))
         .then((mail) => take({ to: text(mail.to), subject: mail.subject ?? '', text: mail.text ?? '' }))
         .then(() => done(), done)
     },
