@@ -37,7 +37,7 @@ export const previewImport = endpoint('POST /api/panels/:panel/imports/preview',
   params: atPanel,
   body: z.strictObject({ text }),
   response: importPreview,
-  bodyLimit: limits.importBytes + 4096,
+  bodyLimit: 2 * limits.importBytes + 4096,
 })
 export const storeImport = endpoint('POST /api/panels/:panel/imports', {
   id: 'storeImport',
@@ -47,5 +47,5 @@ export const storeImport = endpoint('POST /api/panels/:panel/imports', {
   body: importBody,
   response: z.strictObject({ round: id }),
   idempotent: true,
-  bodyLimit: limits.importBytes + 8192,
+  bodyLimit: 2 * limits.importBytes + 8192,
 })

@@ -1,3 +1,4 @@
+import { fixRatingsFile } from '#server/features/analysis/ratings-file-service.ts'
 import { putOnRecord } from '#server/features/record/service.ts'
 import { ApiError } from '#server/http/api-error.ts'
 import { announce } from '#server/http/changes.ts'
@@ -28,6 +29,7 @@ export async function closeRound(
     changedAt: context.now,
     version: round.version + 1,
   })
+  await fixRatingsFile(context, round)
   await putOnRecord(context, 'round closed', { roundId: round.id, facts: { out: progress.servings.out } })
   await announce(context, { round: round.id })
   return showRound(context, at)

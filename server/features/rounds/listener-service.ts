@@ -1,3 +1,4 @@
+import type { EveningDraft } from '#shared/contracts/evening-draft.ts'
 import type { Descriptor } from '#shared/contracts/scorecard.ts'
 import type { Round } from '#server/models/round.ts'
 import { descriptorsOf } from './facts-service.ts'
@@ -11,3 +12,9 @@ export async function describeRound(round: Round): Promise<{ scorecard: Descript
   )
   return { scorecard, tracks: round.origin === 'imported' ? [] : readPlan(round.plan).tracks }
 }
+
+/** How the round was done; null for an imported one, which does not know. */
+export const planOfRound = (
+  round: Round,
+): Pick<EveningDraft, 'levelMatching' | 'hiding' | 'sourceChain' | 'tracks'> | null =>
+  round.origin === 'imported' ? null : readPlan(round.plan)
