@@ -25,7 +25,6 @@ export function PasswordForm({ email }: { email: string }) {
     <form onSubmit={submit} noValidate className="fields">
       <ErrorSummary errors={faults} attempt={attempt} />
       <FormProblem problem={problem} />
-      <input type="email" autoComplete="username" value={email} readOnly hidden />
       <TextField
         label="Present password"
         type="password"
@@ -45,6 +44,7 @@ export function PasswordForm({ email }: { email: string }) {
         Change the password
       </Button>
       {saved && <Notice kind="done" live title="Password changed. Other places are signed out." />}
+      <input type="email" autoComplete="username" value={email} readOnly hidden />
     </form>
   )
 }

@@ -28,7 +28,7 @@ export default function SignInPage() {
   return (
     <Threshold>
       <PageTitle size="plain">Sign in</PageTitle>
-      <p className="note mt-1">Listeners need no account: they open the link or the QR code of their seat.</p>
+      <p className="note mt-3">Listeners need no account: they open the link or the QR code of their seat.</p>
       <form onSubmit={submit} noValidate className="fields mt-6">
         <ErrorSummary errors={faults} attempt={attempt} />
         <FormProblem problem={problem} />

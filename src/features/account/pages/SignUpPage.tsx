@@ -38,7 +38,7 @@ export default function SignUpPage() {
   return (
     <Threshold>
       <PageTitle size="plain">Create an account and a panel</PageTitle>
-      <p className="note mt-1">
+      <p className="note mt-3">
         For whoever organises. Those who only listen need no account.{' '}
         <Link to={to('signIn')}>Sign in instead</Link>
       </p>

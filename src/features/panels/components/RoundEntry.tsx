@@ -17,7 +17,7 @@ export function RoundEntry({ panel, round, zone }: RoundEntryProps) {
   return (
     <li className="flex items-start gap-4 py-4">
       <div className="min-w-0 flex-1">
-        <h3 className="heading">{round.title}</h3>
+        <h2 className="heading">{round.title}</h2>
         <p className="text-muted">
           Round {round.number} · {counted(round.listeners, 'listener')} · {day(round.changedAt, zone)}.{' '}
           {state}

@@ -39,7 +39,7 @@ export function ConditionsFields({ form, errorAt }: EveningPart) {
   const hiding = useWatch({ control: form.control, name: 'hiding' })
   const [own, setOwn] = useState(() => !hidingWords.some((words) => words === hiding))
   return (
-    <div className="fields">
+    <>
       <ChoiceRows
         legend="How levels are matched"
         name="levelMatching"
@@ -72,6 +72,6 @@ export function ConditionsFields({ form, errorAt }: EveningPart) {
           {...form.register('hiding')}
         />
       )}
-    </div>
+    </>
   )
 }

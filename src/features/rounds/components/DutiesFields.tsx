@@ -52,7 +52,7 @@ export function DutiesFields({ form, errorAt }: EveningPart) {
   const tagging = useWatch({ control: form.control, name: 'tagging' })
   const put = (next: DraftPerson[]) => form.setValue('people', next, { shouldDirty: true })
   return (
-    <div className="fields">
+    <>
       <ChoiceRows
         legend="Who tags the pouches with codes"
         name="tagging"
@@ -83,6 +83,6 @@ export function DutiesFields({ form, errorAt }: EveningPart) {
           }
         />
       ))}
-    </div>
+    </>
   )
 }

@@ -1,5 +1,6 @@
-import type { ReactNode } from 'react'
+import { useEffect, type ReactNode } from 'react'
 import { useWatch } from 'react-hook-form'
+import { useLocation } from 'react-router-dom'
 import type { EveningDraft, EveningDraftInput } from '#shared/contracts/evening-draft.ts'
 import { Problem } from '#src/components/asked/Problem.tsx'
 import { FolioSection } from '#src/components/layout/Folio.tsx'
@@ -11,12 +12,9 @@ import { useEveningForm } from '../evening/evening-form.ts'
 import { eveningSentence, panelSizeWords } from '../evening/plan-words.ts'
 import { withDuties } from '../evening/share-out-duties.ts'
 import { tidyDraft } from '../evening/tidy-draft.ts'
-import { ConditionsFields, TracksField } from './ConditionsFields.tsx'
-import { DutiesFields } from './DutiesFields.tsx'
+import { EveningSections } from './EveningSections.tsx'
 import { PeopleFields } from './PeopleFields.tsx'
-import { ScorecardFields } from './ScorecardFields.tsx'
 import { UnitsFields } from './UnitsFields.tsx'
-import { WordsFields } from './WordsFields.tsx'
 
 interface EveningFormProps {
   draft: EveningDraftInput
@@ -33,6 +31,12 @@ interface EveningFormProps {
 export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal }: EveningFormProps) {
   const { form, submit, faults, attempt, problem, busy, errorAt } = useEveningForm({ draft, kept, send })
   const part = { form, errorAt }
+  const { hash } = useLocation()
+  useEffect(() => {
+    const wanted = hash === '' ? null : document.getElementById(hash.slice(1))
+    wanted?.focus()
+    wanted?.scrollIntoView({ block: 'start' })
+  }, [hash])
   const [units, people, scorecard] = useWatch({
     control: form.control,
     name: ['units', 'people', 'scorecard'],
@@ -50,6 +54,7 @@ export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal 
   return (
     <form
       noValidate
+      className="mt-12 border-t border-line pt-8 page:pt-12"
       onSubmit={(event) => {
         event.preventDefault()
         if (!busy) void tidyAndSend()
@@ -72,19 +77,7 @@ export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal 
       >
         <PeopleFields {...part} known={known.people} />
       </FolioSection>
-      <FolioSection label="Duties">
-        <DutiesFields {...part} />
-      </FolioSection>
-      <FolioSection label="Scorecard">
-        <ScorecardFields {...part} />
-      </FolioSection>
-      <FolioSection label="Music and cloth">
-        <div className="fields">
-          <TracksField {...part} />
-          <ConditionsFields {...part} />
-          <WordsFields {...part} />
-        </div>
-      </FolioSection>
+      <EveningSections {...part} />
       <FolioSection
         label="Then"
         note={small && listening > 1 ? <p>{small}</p> : undefined}

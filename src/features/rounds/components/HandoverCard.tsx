@@ -19,7 +19,7 @@ export function HandoverCard({ at, handover }: HandoverCardProps) {
         <QrCode svg={qr} label={`${label}, opens ${what === 'seat' ? 'the seat' : 'the duty'} on a phone`} />
       </div>
       <div className="min-w-0">
-        <h3 className="heading">{label}</h3>
+        <h2 className="heading">{label}</h2>
         <p className="note">
           {what === 'seat' ? 'Listens' : 'Has a duty'} · {opened ? 'opened on a phone' : 'not opened yet'}
         </p>

@@ -1,4 +1,5 @@
 import type { Round } from '#shared/contracts/rounds.ts'
+import { sentenceCase } from '#src/lib/counts.ts'
 import { blindingSentence, levelWords } from '../evening/plan-words.ts'
 import { dutyWords } from '../evening/role-words.ts'
 import { Facts } from './Facts.tsx'
@@ -29,7 +30,7 @@ export function RoundFacts({ round }: { round: Round }) {
         ['Scorecard', <ScorecardList scorecard={round.scorecard} primary={round.primaryDescriptor} />],
         ['Music', list(round.tracks) || 'Not named'],
         ['Source', round.sourceChain],
-        ['Levels', levelWords[round.levelMatching]],
+        ['Levels', sentenceCase(levelWords[round.levelMatching])],
         ['Shape and cable', round.hiding],
         [
           'Published',

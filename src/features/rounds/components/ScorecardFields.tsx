@@ -12,6 +12,7 @@ import { minutesPerTurn } from '#shared/domain/timing.ts'
 import { FamilyName } from '#src/components/FamilySign.tsx'
 import { ChoiceRows } from '#src/components/ui/ChoiceRows.tsx'
 import { SelectField } from '#src/components/ui/SelectField.tsx'
+import { lineNames } from '../evening/draft-words.ts'
 import type { EveningPart } from '../evening/evening-form.ts'
 
 const same = (a: readonly string[], b: readonly string[]): boolean =>
@@ -19,9 +20,6 @@ const same = (a: readonly string[], b: readonly string[]): boolean =>
 
 const inLexiconOrder = (keys: readonly string[]): string[] =>
   lexicon.map((entry) => entry.key).filter((key) => keys.includes(key))
-
-const namesOf = (keys: readonly string[]): string =>
-  keys.map((key) => (lexiconEntry(key)?.name ?? key).toLocaleLowerCase('en')).join(', ')
 
 type Kind = 'short' | 'core' | 'pick'
 const kindOf = (keys: readonly string[]): Kind =>
@@ -55,12 +53,12 @@ export function ScorecardFields({ form, errorAt }: EveningPart) {
           {
             value: 'short',
             label: `Five lines, ${minutes(shortScorecard.length)}`,
-            hint: `${namesOf(shortScorecard)}.`,
+            hint: `${lineNames(shortScorecard)}.`,
           },
           {
             value: 'core',
             label: `The ten core lines, ${minutes(coreScorecard.length)}`,
-            hint: `${namesOf(coreScorecard)}.`,
+            hint: `${lineNames(coreScorecard)}.`,
           },
           { value: 'pick', label: 'Pick from eighteen', hint: 'More lines tire listeners sooner.' },
         ]}

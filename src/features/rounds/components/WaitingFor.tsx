@@ -3,8 +3,18 @@ import { Empty } from '#src/components/ui/Empty.tsx'
 
 /** Who still owes something, by seat. */
 export function WaitingFor({ progress }: { progress: Progress }) {
+  const { planned, submitted } = progress.servings
   if (progress.waitingFor.length === 0)
-    return <Empty what="Nobody owes a rating." sentence="The round can be closed." />
+    return submitted < planned ? (
+      <Empty
+        what="Nobody owes a rating just now."
+        sentence={
+          progress.turn === 0 ? 'The steward begins the first turn.' : 'The steward begins the next turn.'
+        }
+      />
+    ) : (
+      <Empty what="Nobody owes anything." sentence="The round can be closed." />
+    )
   return (
     <ul className="rows">
       {progress.waitingFor.map(({ seat, what }) => (

@@ -1,10 +1,11 @@
+import { turnsNeeded } from '#shared/allocation/turns.ts'
 import type { Round } from '#shared/contracts/rounds.ts'
 import { eveningMinutes, minutesPerTurn, timing } from '#shared/domain/timing.ts'
 import { counted, sentenceCase, spokenMinutes } from '#src/lib/counts.ts'
 
-/** What an evening of this size comes to. Turns are the larger of units and listeners; minutes as `timing` has them. */
+/** What an evening of this size comes to; minutes as `timing` has them. */
 export function eveningSize(units: number, listeners: number, descriptors: number) {
-  const turns = Math.max(units, listeners)
+  const turns = turnsNeeded(units, listeners)
   return { turns, each: minutesPerTurn(descriptors + 1), ...eveningMinutes(turns, descriptors + 1) }
 }
 
@@ -15,6 +16,12 @@ export function eveningSentence(units: number, listeners: number, descriptors: n
   const size = `${counted(units, 'unit')}, ${counted(listeners, 'listener')}`
   return `${sentenceCase(size)}: ${counted(turns, 'turn')} of about ${each} minutes, ${spokenMinutes(total)}${pause}.`
 }
+
+/** Why there is a turn more than anyone would expect; null where there is not. */
+export const extraTurnWords = (units: number, listeners: number): string | null =>
+  units <= 6 && listeners === units + 1 && turnsNeeded(units, listeners) > listeners
+    ? 'One turn more than listeners: with exactly one listener more than units, whoever knew who rests when could otherwise tell which codes are one unit.'
+    : null
 
 /** What so few listeners may say in public; null where nothing special holds. */
 export function panelSizeWords(listeners: number): string | null {

@@ -17,15 +17,17 @@ import { OpenRound } from '../components/OpenRound.tsx'
 import { PlanPicture } from '../components/PlanPicture.tsx'
 import { PlanSentence } from '../components/PlanSentence.tsx'
 import { RoundFacts } from '../components/RoundFacts.tsx'
-import { blindingSentence, panelSizeWords } from '../evening/plan-words.ts'
+import { blindingSentence, extraTurnWords, panelSizeWords } from '../evening/plan-words.ts'
 import { roundQuery } from '../queries.ts'
 
 function PlanNotes({ round }: { round: Round }) {
   const listeners = round.people.filter((person) => person.roles.includes('panelist')).length
   const small = panelSizeWords(listeners)
+  const extra = round.origin === 'live' ? extraTurnWords(round.unitCount, listeners) : null
   return (
     <>
       {small && <p>{small}</p>}
+      {extra && <p>{extra}</p>}
       <p>{blindingSentence[round.blinding]}</p>
       {round.levelMatching === 'not-matched' && (
         <p>Levels are not matched. The louder unit is often liked better; the verdict says so.</p>

@@ -31,7 +31,10 @@ function Verbs({ panel, round, progress }: { panel: string; round: Round; progre
   return (
     <div className="actions mt-6">
       {round.can.steward && sitting && (
-        <LinkButton kind={progress.waitingFor.length > 0 ? 'primary' : 'secondary'} to={to('table', sitting)}>
+        <LinkButton
+          kind={progress.servings.submitted < progress.servings.planned ? 'primary' : 'secondary'}
+          to={to('table', sitting)}
+        >
           Steward the table
         </LinkButton>
       )}

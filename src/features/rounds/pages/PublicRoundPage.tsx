@@ -83,7 +83,7 @@ export default function PublicRoundPage() {
                   ),
                 ],
                 ['Blinding', blindingSentence[round.blinding]],
-                ['Levels', levels(round.levelMatching)],
+                ['Levels', sentenceCase(levels(round.levelMatching))],
                 ['Shape and cable', round.hiding],
                 ['Music', round.tracks.length > 0 ? round.tracks.join(' · ') : 'Not named'],
                 [
