@@ -11,7 +11,7 @@ function leastSquares(total: number, cells: number): number {
 
 const POSITION_WEIGHT = 6
 const WAIT_WEIGHT = 2
-const WARMEST = 10
+const WARMEST = 6
 
 /**
  * A square read as an evening: rows are people, columns turns, symbols below `units` are units and the others rests.
