@@ -5,6 +5,7 @@ import type { Deps } from './deps.ts'
 import { features } from './features/index.ts'
 import { errorHandler, noSuchEndpoint } from './http/error-handler.ts'
 import { mounter } from './http/mount.ts'
+import { openApiRoute } from './http/openapi-route.ts'
 import { pages } from './http/pages.ts'
 import { limited } from './http/rate-limits.ts'
 import { requestId } from './http/request-id.ts'
@@ -46,6 +47,7 @@ export function createApp(deps: Deps, options: { pruneSessionsEvery?: number | f
   api.use('/api', sameOrigin)
   const mount = mounter(api, deps)
   for (const feature of features) feature(mount, api, deps)
+  api.get('/api/openapi.json', openApiRoute)
   api.use('/api', noSuchEndpoint)
 
   app.use('/api', (_request, response, next) => {

@@ -1,8 +1,6 @@
 import { readFileSync } from 'node:fs'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { z } from 'zod'
 import { endpoints } from '#shared/contracts/all.ts'
-import { endpoint } from '#shared/contracts/endpoint.ts'
 import { statusOf } from '#shared/contracts/errors.ts'
 import { apiPage } from '#server/http/api-page.ts'
 import { openApi, type OpenApi } from '#server/http/openapi.ts'
@@ -28,18 +26,13 @@ describe('the API’s description', () => {
     expect(new Set(ids).size).toBe(ids.length)
   })
 
-  it('would miss an endpoint that no contract file exports', () => {
-    const unlisted = endpoint('GET /api/elsewhere', {
-      id: 'elsewhere',
-      audience: 'anyone',
-      summary: 'Not in the list',
-      response: z.strictObject({}),
-    })
-    const ids = operations(served).map(({ operationId }) => operationId)
-    expect(ids).not.toContain(unlisted.id)
-    expect(operations(openApi([...endpoints, unlisted])).map(({ operationId }) => operationId)).toContain(
-      unlisted.id,
-    )
+  it('is not complete when one endpoint is left out', () => {
+    for (const left of endpoints.slice(0, 3)) {
+      const ids = operations(openApi(endpoints.filter((one) => one !== left))).map(
+        ({ operationId }) => operationId,
+      )
+      expect(ids).not.toContain(left.id)
+    }
   })
 
   it('names each part of an address as a parameter of it', () => {
