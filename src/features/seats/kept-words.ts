@@ -3,11 +3,12 @@ import type { KeptServing } from './keeping/kept-serving.ts'
 
 /** The quiet words at the foot: whether what was touched is kept, and whether it is sent. */
 export function keptWords(state: KeepingState, kept: KeptServing | undefined): string {
-  const place = state.durable
-    ? 'saved on this phone'
-    : 'kept only while this page is open: this browser does not let Scrim save'
-  if (kept?.outbox?.state === 'queued')
-    return state.sending ? `${place} · sending` : `${place} · not sent yet`
-  if (!kept) return state.durable ? '' : 'this browser does not let Scrim save: do not close this page'
-  return state.saving && state.durable ? 'saving' : place
+  if (!state.durable) {
+    const words = 'this browser does not let Scrim save: do not close this page'
+    return kept?.outbox ? `${words} · not sent yet` : words
+  }
+  if (!kept) return ''
+  if (state.saving) return 'saving'
+  if (kept.outbox?.state !== 'queued') return 'saved on this phone'
+  return state.sending ? 'saved on this phone · sending' : 'saved on this phone · not sent yet'
 }

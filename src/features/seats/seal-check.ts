@@ -14,6 +14,9 @@ export interface SealCheck {
 
 export const sealStart: SealCheck = { at: 'bass', reseats: 0, otherTips: false, unsure: false }
 
+/** Where a check stands that was told as "no seal" before this page was loaded. */
+export const sealNone: SealCheck = { ...sealStart, at: 'no-seal' }
+
 export type SealAnswer = 'yes' | 'no' | 'cant-tell' | 'done' | 'no-other-tips' | 'again'
 
 /** One step of the seal check. `done` follows an instruction (seated anew, other tips on), `again` starts over. */

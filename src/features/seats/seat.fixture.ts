@@ -5,7 +5,16 @@ import { lexiconEntry, liking, shortScorecard, type LexiconEntry } from '#shared
 const scale = { low: 0, high: 100, step: 1 }
 
 /** A lexicon entry as a scorecard's line. */
-export const lineOf = ({ key, name, family, sentence, sided, low, middle, high }: LexiconEntry): Descriptor => ({
+export const lineOf = ({
+  key,
+  name,
+  family,
+  sentence,
+  sided,
+  low,
+  middle,
+  high,
+}: LexiconEntry): Descriptor => ({
   key,
   name,
   family,

@@ -43,7 +43,7 @@ export function screenFor(
 /** Which turn's serving is being waited for: "your first of five", "your third of five". */
 export function nextServing(seat: PanelistSeat): { ordinal: number; of: number } | null {
   const of = seat.plan.servings
-  const behind = seat.serving?.ordinal ?? 0
+  const behind = Math.max(seat.serving?.ordinal ?? 0, ...seat.heard.map(({ ordinal }) => ordinal))
   return behind < of ? { ordinal: behind + 1, of } : null
 }
 

@@ -51,6 +51,7 @@ export function EndQuestions({
     },
   })
   const recognised = form.watch('recognised')
+  const asksWhich = (recognised === 'perhaps' || recognised === 'yes') && seat.heard.length > 0
   const { errors, submitCount } = form.formState
   const send = (body: EndTyped) => {
     setProblem(null)
@@ -97,9 +98,7 @@ export function EndQuestions({
             />
           )}
         />
-        {(recognised === 'perhaps' || recognised === 'yes') && (
-          <Recognitions form={form} heard={seat.heard} />
-        )}
+        {asksWhich && <Recognitions form={form} heard={seat.heard} />}
       </form>
       {problem !== null && (
         <CallFailure

@@ -8,6 +8,7 @@ import { numberWord } from '#src/lib/counts.ts'
 import { seatQuery } from '../queries.ts'
 import {
   mostReseats,
+  sealNone,
   sealOutcome,
   sealQuestions,
   sealStart,
@@ -45,7 +46,7 @@ export function SealScreen({
   kept: ReactNode
 }) {
   const client = useQueryClient()
-  const [check, setCheck] = useState(sealStart)
+  const [check, setCheck] = useState(serving.sealChecked ? sealNone : sealStart)
   const tell = useMutation({
     mutationFn: (sealed: 'yes' | 'unsure' | 'no') =>
       call(checkSeal, { params: { seat: seat.id, serving: serving.id }, body: { sealed } }),

@@ -48,6 +48,7 @@ export function SeatScreens({ seat, keeping, state, connection }: SeatScreensPro
         keeping={keeping}
         state={state}
         seat={seat.id}
+        scorecard={seat.scorecard}
         except={rating && place ? keptId(place) : null}
       />
     </>

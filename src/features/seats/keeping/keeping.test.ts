@@ -50,7 +50,10 @@ describe('keeping on this phone', () => {
   })
 
   test('a submission while the network is away stays on the phone and is sent once when it is back', async () => {
-    const send = vi.fn<(kept: KeptServing) => Promise<Outcome>>().mockImplementationOnce(away).mockResolvedValue('taken')
+    const send = vi
+      .fn<(kept: KeptServing) => Promise<Outcome>>()
+      .mockImplementationOnce(away)
+      .mockResolvedValue('taken')
     const keeping = await settledTab(tab(send))
     keeping.change(place, { answers: { warmth: 62 } })
     await keeping.submit(place)
@@ -143,7 +146,9 @@ describe('where the browser keeps nothing', () => {
         Promise.resolve({
           ...shelf,
           update: (which, change) =>
-            full ? Promise.reject(new DOMException('full', 'QuotaExceededError')) : shelf.update(which, change),
+            full
+              ? Promise.reject(new DOMException('full', 'QuotaExceededError'))
+              : shelf.update(which, change),
         }),
       send: away,
       tell: () => undefined,

@@ -9,7 +9,14 @@ import { lostSeatWords, settled } from './settle.ts'
 const place = { seat: 's', serving: 'v', code: '417', ordinal: 1 }
 const start = keptStart(place)
 const refusal = (code: ErrorCode) =>
-  new CallError({ type: 'about:blank', title: '', status: 400, detail: `because ${code}`, code, requestId: 'r' })
+  new CallError({
+    type: 'about:blank',
+    title: '',
+    status: 400,
+    detail: `because ${code}`,
+    code,
+    requestId: 'r',
+  })
 
 describe('what is kept of one serving', () => {
   test('answers are laid over each other line by line, and cleared lines are open again', () => {
@@ -75,7 +82,11 @@ describe('after an attempt to send', () => {
   test('a refusal keeps the answers and says why; sending again uses the same key', () => {
     const left = settled(queued, { error: refusal('conflict') })
     expect(left?.answers).toEqual(queued.answers)
-    expect(left?.outbox).toMatchObject({ state: 'refused', words: 'because conflict', key: queued.outbox?.key })
+    expect(left?.outbox).toMatchObject({
+      state: 'refused',
+      words: 'because conflict',
+      key: queued.outbox?.key,
+    })
     expect(requeued(left)?.outbox).toEqual(queued.outbox)
   })
 

@@ -1,6 +1,6 @@
 import { useQueryClient } from '@tanstack/react-query'
 import { useEffect, useMemo, useRef, useSyncExternalStore } from 'react'
-import { submitRatings } from '#shared/contracts/seats.ts'
+import { getSeat, submitRatings } from '#shared/contracts/seats.ts'
 import { call } from '#src/lib/call.ts'
 import { seatQuery } from '../queries.ts'
 import { createKeeping, type Keeping, type KeepingState } from './keeping.ts'
@@ -34,6 +34,8 @@ export function useKeeping(): [Keeping, KeepingState] {
       })
       await client.cancelQueries({ queryKey: seatQuery(seat).queryKey })
       client.setQueryData(seatQuery(seat).queryKey, now)
+      // A repeated key gets the first answer again, which may be old by now.
+      void client.invalidateQueries({ queryKey: seatQuery(seat).queryKey })
       return outcome
     }
     return createKeeping({ open: openShelf, send, tell: () => tabs.current?.postMessage('changed') })
@@ -47,13 +49,20 @@ export function useKeeping(): [Keeping, KeepingState] {
     const back = () => {
       if (document.visibilityState === 'visible') void keeping.reread().then(send)
     }
-    const other = () => void keeping.reread()
+    const other = async () => {
+      const before = [...keeping.state().records.keys()]
+      await keeping.reread()
+      // Another tab has sent or put away what this one still shows: the seat has moved on.
+      if (before.some((id) => !keeping.state().records.has(id)))
+        await client.invalidateQueries({ queryKey: [getSeat.id] })
+    }
+    const told = () => void other()
     const channel = openChannel()
     tabs.current = channel
     back()
     window.addEventListener('online', send)
     document.addEventListener('visibilitychange', back)
-    channel?.addEventListener('message', other)
+    channel?.addEventListener('message', told)
     const timer = setInterval(send, askAgainAfter)
     return () => {
       window.removeEventListener('online', send)
@@ -62,7 +71,7 @@ export function useKeeping(): [Keeping, KeepingState] {
       tabs.current = null
       channel?.close()
     }
-  }, [keeping])
+  }, [keeping, client])
 
   return [keeping, useSyncExternalStore(keeping.subscribe, keeping.state)]
 }

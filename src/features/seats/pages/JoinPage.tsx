@@ -32,29 +32,32 @@ export default function JoinPage() {
       </SeatLayout>
     )
   const told = opening.error instanceof CallError ? opening.error : null
-  const old = told !== null && told.problem.status < 500 && told.code !== 'too_many'
+  const refused = told !== null && told.problem.status < 500 && told.code !== 'too_many'
+  const old = told?.code === 'not_found' || told?.code === 'malformed' || told?.code === 'invalid'
   return (
     <SeatLayout>
       <ScreenTitle>
-        {old ? 'This link does not open a seat any more' : 'The link could not be opened'}
+        {old
+          ? 'This link does not work any more'
+          : refused
+            ? 'This link cannot be opened here'
+            : 'The link could not be opened'}
       </ScreenTitle>
       <div className="mt-4">
-        {old ? (
-          <Failure
-            what="A newer link was made, or the round is over."
-            kept="Whatever was sent from this seat is kept."
-            todo="Ask the organiser or the steward for the seat’s present link. It opens on any phone."
-            requestId={told.problem.requestId || null}
-          />
-        ) : (
-          <Failure
-            what="Nothing has changed."
-            todo={told?.message ?? 'Try again in a moment.'}
-            requestId={told?.problem.requestId || null}
-            onRetry={() => mutate()}
-            retrying={opening.isPending}
-          />
-        )}
+        <Failure
+          what={
+            old ? 'A newer link was made, or the round is not open to listeners.' : 'Nothing has changed.'
+          }
+          kept={old ? 'Whatever was sent from this seat is kept.' : undefined}
+          todo={
+            old
+              ? 'Ask the organiser or the steward for the present link. It opens on any phone.'
+              : (told?.message ?? 'Try again in a moment.')
+          }
+          requestId={told?.problem.requestId || null}
+          onRetry={refused ? undefined : () => mutate()}
+          retrying={opening.isPending}
+        />
       </div>
     </SeatLayout>
   )

@@ -35,7 +35,7 @@ export function SeatLine({ seat, sitting, now, onMore }: SeatLineProps) {
       </div>
       <div className="run-more">
         <Button kind="secondary" onClick={onMore}>
-          Something else<VisuallyHidden> with {seat.label}</VisuallyHidden>
+          More <VisuallyHidden>for {seat.label}</VisuallyHidden>
         </Button>
       </div>
     </li>

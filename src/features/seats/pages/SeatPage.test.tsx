@@ -1,0 +1,282 @@
+import { screen, waitFor, within } from '@testing-library/react'
+import { userEvent } from '@testing-library/user-event'
+import { IDBFactory } from 'fake-indexeddb'
+import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest'
+import {
+  answerEnd,
+  checkSeal,
+  confirmCode,
+  getSeat,
+  getSeatReport,
+  giveConsent,
+  submitRatings,
+  type PanelistSeat,
+} from '#shared/contracts/seats.ts'
+import { paths, to } from '#src/app/paths.ts'
+import { fakeServer, Refusal, showPage } from '#tests/support/show-page.tsx'
+import { otherSeatId, scorecardOf, seatFixture, seatId, servingFixture } from '../seat.fixture.ts'
+import SeatPage from './SeatPage.tsx'
+
+const show = (state: unknown = null) =>
+  showPage(SeatPage, paths.seat.pattern, { pathname: to('seat', { seat: seatId }), state })
+
+const card = scorecardOf(['warmth', 'width'])
+
+/** A server that holds one seat and moves it on as the real one does. */
+function seatServer(part: Partial<PanelistSeat>) {
+  const held = { seat: seatFixture(part) }
+  const set = (next: Partial<PanelistSeat>) => (held.seat = { ...held.seat, ...next })
+  const server = fakeServer()
+    .on(getSeat, () => held.seat)
+    .on(giveConsent, () => set({ step: 'waiting', consented: true }))
+    .on(confirmCode, ({ body }) =>
+      (body as { code: string }).code === '417'
+        ? set({ step: 'seal', serving: servingFixture({ sealChecked: false }) })
+        : new Refusal('invalid', 'Wrong code', { code: 'These are not the digits of your pouch.' }),
+    )
+    .on(checkSeal, () => set({ step: 'rate', serving: servingFixture() }))
+    .on(submitRatings, () => ({
+      outcome: 'taken' as const,
+      seat: set({ step: 'sent', serving: servingFixture({ state: 'submitted' }) }),
+    }))
+    .on(answerEnd, () => set({ step: 'thanks' }))
+  return { server, held, set }
+}
+
+const rating = () => seatServer({ step: 'rate', serving: servingFixture(), scorecard: card })
+const range = (name: string) => screen.getByRole('slider', { name })
+const press = (name: string | RegExp) => userEvent.click(screen.getByRole('button', { name }))
+
+/** Answers liking, warmth and width and comes to the last look. */
+async function answerAll() {
+  await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+  range('Overall liking').focus()
+  await userEvent.keyboard('{ArrowRight}{ArrowRight}')
+  await press('Next: tonal balance')
+  await userEvent.click(screen.getByRole('checkbox', { name: /can’t tell/ }))
+  await press('Next: staging')
+  await press(/Width: a step towards well outside/)
+  await press('Next: a remark')
+  await userEvent.type(screen.getByRole('textbox', { name: /Remark/ }), 'thin voice')
+  await press('Next: a last look')
+}
+
+beforeEach(() => {
+  globalThis.indexedDB = new IDBFactory()
+  sessionStorage.clear()
+})
+afterEach(() => vi.unstubAllGlobals())
+
+describe('before the first pouch', () => {
+  test('what is coming is read first, then consent is asked once, and only adults take part', async () => {
+    const { server } = seatServer({ step: 'consent', consented: false, turn: 0 })
+    show()
+    await screen.findByText(/Four pairs of earphones/)
+    await press('Go on')
+    expect(screen.getByText(/by listener number, never by name/)).toBeVisible()
+    expect(screen.getByText(/stop at once on pain, ringing/)).toBeVisible()
+    await press('Take part')
+    expect(await screen.findByText('Only adults take part.')).toBeVisible()
+    expect(server.asked('giveConsent')).toHaveLength(0)
+    await userEvent.click(screen.getByRole('checkbox'))
+    await press('Take part')
+    await screen.findByRole('heading', { level: 1, name: 'Next: your first of four' })
+    expect(server.asked('giveConsent')).toHaveLength(1)
+  })
+
+  test('a round that publishes no rows says so in its consent', async () => {
+    seatServer({ step: 'consent', consented: false, publishesRows: false })
+    show()
+    await userEvent.click(await screen.findByRole('button', { name: 'Go on' }))
+    expect(screen.getByText(/this round publishes no rows/)).toBeVisible()
+  })
+
+  test('a wrong code stops, says what to do and keeps the screen; the right one goes on to the seal check', async () => {
+    seatServer({
+      step: 'enter-code',
+      serving: servingFixture({ state: 'handed', code: null, sealChecked: false }),
+    })
+    show()
+    const digits = await screen.findByRole('textbox', { name: 'Digits' })
+    expect(document.body).not.toHaveTextContent('417')
+    await userEvent.type(digits, '528{Enter}')
+    expect(await screen.findByText('These are not the digits of your pouch.')).toBeVisible()
+    await userEvent.clear(digits)
+    await userEvent.type(digits, '417{Enter}')
+    await screen.findByRole('heading', { level: 1, name: 'Is the bass there?' })
+    await press('Yes')
+    await press('Yes')
+    await press('Yes')
+    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+  })
+})
+
+describe('rating one serving', () => {
+  test('liking comes first, families follow, and what is sent is what was touched', async () => {
+    const { server } = rating()
+    show()
+    await answerAll()
+    await press('Send this serving')
+    await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
+    expect(server.asked('submitRatings').map(({ body }) => body)).toEqual([
+      {
+        answers: [
+          { descriptor: 'overall-liking', value: 51, cantTell: false },
+          { descriptor: 'warmth', value: null, cantTell: true },
+          { descriptor: 'width', value: 50, cantTell: false },
+        ],
+        remark: 'thin voice',
+      },
+    ])
+  })
+
+  test('a line left open cannot be sent, and the last look says how many are', async () => {
+    const { server } = rating()
+    show()
+    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+    for (const verb of ['Next: tonal balance', 'Next: staging', 'Next: a remark', 'Next: a last look'])
+      await press(verb)
+    expect(screen.getByText(/three lines still open/)).toBeVisible()
+    await press('Send this serving')
+    expect(server.asked('submitRatings')).toHaveLength(0)
+  })
+
+  test('a reload in the middle comes back to the same screen with the same answers', async () => {
+    rating()
+    const before = show()
+    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+    await press('Overall liking: a step towards like very much')
+    await press('Next: tonal balance')
+    await screen.findByText('saved on this phone')
+    before.unmount()
+    show()
+    await screen.findByRole('heading', { level: 1, name: 'Tonal balance' })
+    await press('Back to overall liking')
+    expect(range('Overall liking')).toHaveAttribute('aria-valuetext', '50 of 100, halfway')
+  })
+
+  test('without a network the serving stays on the phone, over a reload, and is sent once when it is back', async () => {
+    const { server } = rating()
+    const before = show()
+    await answerAll()
+    server.reachable = false
+    await press('Send this serving')
+    await screen.findByRole('heading', { level: 1, name: 'Locked, and on its way' })
+    await waitFor(() => expect(server.missed('submitRatings')).toBeGreaterThan(0))
+    await screen.findByText('saved on this phone · not sent yet')
+    before.unmount()
+
+    server.reachable = true
+    show()
+    await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
+    expect(server.asked('submitRatings')).toHaveLength(1)
+    expect(screen.queryByText(/not sent yet/)).not.toBeInTheDocument()
+  })
+
+  test('a double tap sends under one key', async () => {
+    const { server } = rating()
+    show()
+    await answerAll()
+    await userEvent.dblClick(screen.getByRole('button', { name: 'Send this serving' }))
+    await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
+    expect(new Set(server.asked('submitRatings').map(({ key }) => key)).size).toBe(1)
+  })
+
+  test('what arrives after closing is said to be kept and not counted', async () => {
+    const { server, set } = rating()
+    server.on(submitRatings, () => ({
+      outcome: 'late' as const,
+      seat: set({ step: 'closed', serving: null }),
+    }))
+    show()
+    await answerAll()
+    await press('Send this serving')
+    expect(await screen.findByText(/marked as late, and not counted/)).toBeVisible()
+    await press('I have read this')
+    await waitFor(() => expect(screen.queryByText(/marked as late/)).not.toBeInTheDocument())
+  })
+
+  test('a browser that keeps nothing still rates, and says so', async () => {
+    globalThis.indexedDB = {
+      open: () => {
+        throw new DOMException('denied', 'SecurityError')
+      },
+    } as unknown as IDBFactory
+    const { server } = rating()
+    show()
+    await screen.findByText(/does not let Scrim save/)
+    await answerAll()
+    await press('Send this serving')
+    await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
+    expect(server.asked('submitRatings')).toHaveLength(1)
+  })
+})
+
+describe('two people, one phone', () => {
+  test('the other seat opens behind a plain screen that shows nothing of the one before', async () => {
+    seatServer({ otherSeats: [{ id: otherSeatId, label: 'Seat 4' }] })
+    const { router } = show()
+    await userEvent.click(await screen.findByRole('button', { name: 'Hand the phone to Seat 4' }))
+    expect(router.state.location.pathname).toBe(`/seat/${otherSeatId}`)
+    await screen.findByRole('heading', { level: 1, name: /Hand the phone to/ })
+    expect(screen.queryByText(/Next: your first/)).not.toBeInTheDocument()
+    await press(/^I am /)
+    await screen.findByRole('heading', { level: 1, name: 'Next: your first of four' })
+  })
+})
+
+describe('after the last serving', () => {
+  test('a recognition is told by one’s own code and in free text, never from a list of units', async () => {
+    const { server } = seatServer({
+      step: 'end-questions',
+      heard: [
+        { code: '417', ordinal: 1 },
+        { code: '528', ordinal: 2 },
+      ],
+    })
+    show()
+    await userEvent.click(await screen.findByRole('radio', { name: 'Perhaps' }))
+    await press('Send the answers')
+    const summary = await screen.findByRole('alert')
+    expect(within(summary).getByRole('link', { name: 'Say how sure you are.' })).toBeVisible()
+    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Which code' }), '528')
+    await userEvent.type(screen.getByRole('textbox', { name: 'What do you think it was?' }), 'the one I own')
+    await userEvent.click(screen.getByRole('radio', { name: 'A guess' }))
+    await press('Send the answers')
+    await screen.findByRole('heading', { level: 1, name: 'Thank you. That was all' })
+    expect(server.asked('answerEnd')[0]?.body).toEqual({
+      recognised: 'perhaps',
+      recognitions: [{ code: '528', text: 'the one I own', sure: 'guess' }],
+    })
+  })
+
+  test('the own report stands beside the panel’s, without a rank, and says where there are too few to show', async () => {
+    const { server } = seatServer({ step: 'closed', can: { seeReport: true } })
+    server.on(getSeatReport, () => ({
+      label: 'Seat 3',
+      roundTitle: 'Autumn evening',
+      scorecard: card,
+      units: [
+        {
+          maker: 'Saltmarsh Audio',
+          name: 'Dunlin',
+          code: '417',
+          ratings: [
+            { descriptor: 'warmth', yours: 70, cantTell: false, panelMedian: 58, n: 6 },
+            { descriptor: 'width', yours: null, cantTell: true, panelMedian: null, n: 4 },
+          ],
+        },
+      ],
+      verdictSlug: null,
+    }))
+    show()
+    expect(await screen.findByText('you 70 · the panel 58, 6 ratings')).toBeVisible()
+    expect(screen.getByText('you: can’t tell · the panel: too few ratings to show')).toBeVisible()
+  })
+
+  test('a phone that does not hold the seat says how to open it', async () => {
+    fakeServer().on(getSeat, () => new Refusal('not_found', 'There is nothing here.'))
+    show()
+    await screen.findByRole('heading', { level: 1, name: 'This seat is not open on this phone' })
+  })
+})
