@@ -90,7 +90,7 @@ async function main() {
     ...process.env,
     ...addresses,
     SCRIM_MODE: options.mode,
-    SCRIM_SECRET: process.env.SCRIM_SECRET || keptSecret(join(state, 'secret')),
+    SCRIM_SECRET: process.env.SCRIM_SECRET || keptSecret(join(state, `secret-${options.mode}`)),
     SCRIM_LAN: options.lan ? '1' : '0',
   }
   await launch(options, env)
