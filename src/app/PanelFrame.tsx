@@ -16,7 +16,6 @@ export function PanelFrame() {
     { to: to('rounds', { panel }), word: 'Rounds' },
     { to: to('units', { panel }), word: 'Units' },
     { to: to('people', { panel }), word: 'People' },
-    { to: to('settings', { panel }), word: 'Settings' },
   ]
   return (
     <PanelLayout

@@ -20,7 +20,7 @@ export function Who({ me, panel }: { me: Me; panel?: string | undefined }) {
   if (!me.user) return <Link to={`${to('signIn')}?next=${encodeURIComponent(pathname)}`}>Sign in</Link>
   return (
     <>
-      {panel && <span>{panel}</span>}
+      {panel && <span className="hidden page:inline">{panel}</span>}
       <Link to={to('account')}>{me.user.name}</Link>
       <button type="button" className="underline" onClick={() => signOut.mutate()}>
         {signOut.isPending ? 'Signing out' : 'Sign out'}

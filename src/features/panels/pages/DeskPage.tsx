@@ -22,7 +22,10 @@ export default function DeskPage() {
             label={
               <>
                 <div>Desk</div>
-                <div>{you.roles.join(', ')}</div>
+                <div>you: {you.roles.join(', ')}</div>
+                <div>
+                  <Link to={to('settings', { panel: slug })}>Settings of the panel</Link>
+                </div>
               </>
             }
             note={

@@ -1,6 +1,7 @@
 import { useEffect } from 'react'
 import type { UseFormReturn } from 'react-hook-form'
 import { eveningDraft, type EveningDraft, type EveningDraftInput } from '#shared/contracts/evening-draft.ts'
+import type { Fault } from '#src/lib/form-faults.ts'
 import type { Kept } from '#src/lib/kept.ts'
 import { useContractForm } from '#src/lib/use-contract-form.ts'
 
@@ -21,6 +22,13 @@ export function inputOf(field: string): string {
   return field
 }
 
+/** A fault as the summary says it, where several inputs may have the same: "Unit 2: Enter the maker." */
+export function summed({ field, message }: Fault): Fault {
+  const [, list, nth] = /^(units|people)\.(\d+)\./.exec(field) ?? []
+  if (nth === undefined) return { field, message }
+  return { field, message: `${list === 'units' ? 'Unit' : 'Person'} ${Number(nth) + 1}: ${message}` }
+}
+
 interface EveningForm {
   draft: EveningDraftInput
   /** Where this tab keeps what is typed. */
@@ -38,5 +46,5 @@ export function useEveningForm({ draft, kept, send }: EveningForm) {
   }, [form, kept])
   const faults = contract.faults.map(({ field, message }) => ({ field: inputOf(field), message }))
   const errorAt: ErrorAt = (field) => faults.find((fault) => fault.field === field)?.message
-  return { ...contract, faults, errorAt }
+  return { ...contract, faults: faults.map(summed), errorAt }
 }
