@@ -24,7 +24,7 @@ export function AgreementNote({ result }: { result: DescriptorResult }) {
       <p>One listener against another: {figureWords(single)}.</p>
       {agreement.steadiness !== '' && (
         <p>
-          {agreement.steadiness} ({figureWords(agreement.average)})
+          {agreement.steadiness} ({figureWords(agreement.average)}).
         </p>
       )}
       <p>

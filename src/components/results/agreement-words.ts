@@ -23,6 +23,12 @@ export function leftOutWords(w: Agreement['w']): string | null {
   return `W stands on the ${counted(used, 'listener')} who rated every unit; ${numberWord(leftOut)} ${leftOut === 1 ? 'was' : 'were'} left out.`
 }
 
+/** The short of a sentence on the panel's mean, for a column of that name: "is steady", "cannot be said". */
+export const steadyShort = (sentence: string): string =>
+  (sentence.split(':')[0] ?? '')
+    .replace(/^The panel’s mean /, '')
+    .replace(/^Whether .* cannot be said$/, 'cannot be said')
+
 /** How much weight a descriptor's sentence may carry. */
 export const statedWords: Record<DescriptorResult['stated'], string> = {
   primary: 'The primary descriptor: named before any rating was seen.',

@@ -17,6 +17,12 @@ describe('who paid', () => {
     ])
   })
 
+  it('says who gave a unit', () => {
+    expect(
+      whoPaid([{ name: 'Tern One', provenance: 'gift', lender: 'Saltmarsh Audio', returnOn: null }]),
+    ).toEqual(['Tern One: given by Saltmarsh Audio.'])
+  })
+
   it('keeps two lenders apart', () => {
     expect(whoPaid([lent('Dunlin'), lent('Avocet', 'a reader')])).toEqual([
       'Dunlin: on loan from a shop until 30 November 2026.',

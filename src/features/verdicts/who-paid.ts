@@ -10,7 +10,7 @@ interface Unit {
 }
 
 const from = (unit: Unit): string => {
-  const lender = unit.lender ? ` from ${unit.lender}` : ''
+  const lender = unit.lender ? ` ${unit.provenance === 'gift' ? 'by' : 'from'} ${unit.lender}` : ''
   const until = unit.returnOn ? ` until ${day(unit.returnOn, 'UTC')}` : ''
   return lender + until
 }

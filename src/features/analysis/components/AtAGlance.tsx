@@ -2,7 +2,7 @@ import type { DescriptorResult } from '#shared/contracts/analysis.ts'
 import { FamilyName } from '#src/components/FamilySign.tsx'
 import { AgreementScale } from '#src/components/charts/AgreementScale.tsx'
 import { byFamily } from '#src/components/results/by-family.ts'
-import { figureWords, isSaid, wWords } from '#src/components/results/agreement-words.ts'
+import { figureWords, isSaid, steadyShort, wWords } from '#src/components/results/agreement-words.ts'
 import { DataTable } from '#src/components/ui/DataTable.tsx'
 
 function Scale({ result, ends }: { result: DescriptorResult; ends: boolean }) {
@@ -62,7 +62,7 @@ export function AtAGlance({ results }: { results: DescriptorResult[] }) {
           header: 'Panel’s mean',
           cell: ({ agreement }) => (
             <>
-              <span className="block">{agreement.steadiness || '–'}</span>
+              <span className="block">{steadyShort(agreement.steadiness) || '–'}</span>
               <span className="note block">{figureWords(agreement.average)}</span>
             </>
           ),

@@ -2,7 +2,6 @@ import type { Agreement } from '#shared/contracts/analysis.ts'
 import type { Round } from '#shared/contracts/rounds.ts'
 import { to } from '#src/app/paths.ts'
 import { RoundSelvedge } from '#src/app/RoundSelvedge.tsx'
-import { Code } from '#src/components/Code.tsx'
 import { FolioSection } from '#src/components/layout/Folio.tsx'
 import { labelWords } from '#src/components/results/agreement-words.ts'
 import { LinkButton } from '#src/components/ui/LinkButton.tsx'
@@ -27,12 +26,7 @@ function Labels({ agreement }: { agreement: Agreement }) {
       {agreement.labels.map((label) => (
         <p key={label}>{label}</p>
       ))}
-      {agreement.round.origin === 'live' && (
-        <p>
-          <Code code={null} size="small" drawn label="The cloth is drawn aside." /> The cloth is off: codes
-          have names now.
-        </p>
-      )}
+      {agreement.round.origin === 'live' && <p>The cloth is off: codes have names now.</p>}
     </>
   )
 }

@@ -7,7 +7,6 @@ import { Folio, FolioSection } from '#src/components/layout/Folio.tsx'
 import { byFamily } from '#src/components/results/by-family.ts'
 import { DescriptorSpread } from '#src/components/results/DescriptorSpread.tsx'
 import { IntervalScope } from '#src/components/results/IntervalScope.tsx'
-import { Disclosure } from '#src/components/ui/Disclosure.tsx'
 import { Empty } from '#src/components/ui/Empty.tsx'
 import { AtAGlance, Coefficients } from '../components/AtAGlance.tsx'
 import { Computed } from '../components/Computed.tsx'
@@ -48,9 +47,9 @@ function Spreads({ panel, agreement, round }: SpreadsProps) {
         ) : (
           <>
             <AtAGlance results={agreement.results} />
-            <Disclosure summary="Alpha, W and counts">
+            <div className="mt-8">
               <Coefficients results={agreement.results} />
-            </Disclosure>
+            </div>
           </>
         )}
       </FolioSection>

@@ -34,7 +34,7 @@ export function Files({ verdict }: { verdict: PublicVerdict }) {
       <h2 className="heading mb-3">The data</h2>
       <ul className="rows">
         {files.map((file) => (
-          <li key={file.name} className="flex flex-wrap items-baseline justify-between gap-x-6 py-2">
+          <li key={file.name} className="flex flex-wrap items-center justify-between gap-x-6 py-1">
             <span>{fileWords[file.name]}</span>
             <LinkButton to={file.url} download={file.name} icon="save">
               {file.name}

@@ -37,8 +37,8 @@ export function WordsForm({ at, draft, onUnsaved }: WordsFormProps) {
         <>
           <h3>Scrim’s sentences</h3>
           {draft.sentences.length === 0 && <p>Scrim has nothing to state from these numbers.</p>}
-          {draft.sentences.map((sentence) => (
-            <p key={sentence}>
+          {draft.sentences.map((sentence, nth) => (
+            <p key={nth}>
               {sentence}
               <Button
                 kind="secondary"

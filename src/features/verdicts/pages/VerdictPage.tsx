@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query'
-import { Navigate, useParams, useSearchParams } from 'react-router-dom'
+import { Link, Navigate, useParams, useSearchParams } from 'react-router-dom'
 import type { PublicVerdict } from '#shared/contracts/verdicts.ts'
 import { to } from '#src/app/paths.ts'
 import { Asked } from '#src/components/asked/Asked.tsx'
@@ -34,7 +34,7 @@ function Figures({ verdict }: { verdict: PublicVerdict }) {
   )
 }
 
-function Verdict({ verdict }: { verdict: PublicVerdict }) {
+function Verdict({ verdict, earlier }: { verdict: PublicVerdict; earlier: boolean }) {
   return (
     <Folio>
       <Opening
@@ -42,6 +42,13 @@ function Verdict({ verdict }: { verdict: PublicVerdict }) {
           verdict.panelName,
           day(verdict.publishedAt),
           `Verdict ${verdict.number}, version ${verdict.version}`,
+          ...(earlier
+            ? [
+                <Link key="present" to={to('verdict', { slug: verdict.slug })}>
+                  Read the present version
+                </Link>,
+              ]
+            : []),
         ]}
         {...verdict}
       />
@@ -54,8 +61,8 @@ function Verdict({ verdict }: { verdict: PublicVerdict }) {
         >
           <h2 className="heading mb-3">What the numbers say</h2>
           <div className="reading">
-            {verdict.sentences.map((sentence) => (
-              <p key={sentence}>{sentence}</p>
+            {verdict.sentences.map((sentence, nth) => (
+              <p key={nth}>{sentence}</p>
             ))}
           </div>
         </FolioSection>
@@ -103,7 +110,7 @@ function BySlug({ slug }: { slug: string }) {
   const query = useQuery(verdictQuery(slug, Number.isInteger(version) && version > 0 ? version : undefined))
   return (
     <Asked query={query} waiting="Reading the verdict">
-      {(verdict) => <Verdict verdict={verdict} />}
+      {(verdict) => <Verdict verdict={verdict} earlier={search.has('version')} />}
     </Asked>
   )
 }
