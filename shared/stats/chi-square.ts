@@ -1,4 +1,4 @@
-import jStat from 'jstat'
+import { lowRegGamma, gammaln } from './special-functions.ts'
 
 /**
  * Upper tail of chi-square: the chance of a value at least `x`.
@@ -17,8 +17,8 @@ export function chiSquareUpperTail(x: number, df: number): number {
   if (x <= 0) return 1
   const a = df / 2
   const half = x / 2
-  if (half < a + 1) return 1 - jStat.lowRegGamma(a, half)
-  return Math.exp(a * Math.log(half) - half - jStat.gammaln(a)) * upperFraction(a, half)
+  if (half < a + 1) return 1 - lowRegGamma(a, half)
+  return Math.exp(a * Math.log(half) - half - gammaln(a)) * upperFraction(a, half)
 }
 
 function upperFraction(a: number, x: number): number {

@@ -1,4 +1,4 @@
-import jStat from 'jstat'
+import { ibeta, ibetainv } from './special-functions.ts'
 
 /**
  * Upper tail of Fisher's F: the chance of a value at least `f`. The tail itself, not one minus a distribution
@@ -12,7 +12,7 @@ import jStat from 'jstat'
 export function fUpperTail(f: number, df1: number, df2: number): number {
   if (!(df1 > 0) || !(df2 > 0)) throw new RangeError(`F: df ${df1}, ${df2}`)
   if (f <= 0) return 1
-  return jStat.ibeta(df2 / (df2 + df1 * f), df2 / 2, df1 / 2)
+  return ibeta(df2 / (df2 + df1 * f), df2 / 2, df1 / 2)
 }
 
 /**
@@ -27,6 +27,6 @@ export function fQuantile(upper: number, df1: number, df2: number): number {
   if (!(df1 > 0) || !(df2 > 0) || !(upper > 0 && upper < 1)) {
     throw new RangeError(`F quantile: tail ${upper}, df ${df1}, ${df2}`)
   }
-  const beta = jStat.ibetainv(upper, df2 / 2, df1 / 2)
+  const beta = ibetainv(upper, df2 / 2, df1 / 2)
   return (df2 * (1 - beta)) / (df1 * beta)
 }

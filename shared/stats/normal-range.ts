@@ -1,4 +1,4 @@
-import jStat from 'jstat'
+import { tukey } from './special-functions.ts'
 
 const TERMS = 120
 const WIDEST = 16
@@ -17,7 +17,7 @@ const WIDEST = 16
 export function normalRangeTail(means: number): (w: number) => number {
   const known = series.get(means)
   if (known) return known
-  const coefficients = chebyshev((w) => 1 - jStat.tukey.cdf(w, means, Infinity))
+  const coefficients = chebyshev((w) => 1 - tukey.cdf(w, means, Infinity))
   const tail = (w: number): number => {
     if (w <= 0) return 1
     if (w >= WIDEST) return 0

@@ -1,4 +1,4 @@
-import jStat from 'jstat'
+import { ibeta, ibetainv, gammaln } from './special-functions.ts'
 
 /**
  * Two-sided p of Student's t: the chance of a value at least as far from zero as `t`.
@@ -15,7 +15,7 @@ import jStat from 'jstat'
 export function tTwoSided(t: number, df: number): number {
   if (!(df > 0)) throw new RangeError(`t: df must be positive, got ${df}`)
   if (t === 0) return 1
-  return jStat.ibeta(df / (df + t * t), df / 2, 0.5)
+  return ibeta(df / (df + t * t), df / 2, 0.5)
 }
 
 /**
@@ -30,7 +30,7 @@ export function tTwoSided(t: number, df: number): number {
  */
 export function tQuantile(tail: number, df: number): number {
   if (!(df > 0) || !(tail > 0 && tail < 1)) throw new RangeError(`t quantile: tail ${tail}, df ${df}`)
-  const beta = jStat.ibetainv(tail, df / 2, 0.5)
+  const beta = ibetainv(tail, df / 2, 0.5)
   if (df > 50) return polish(Math.sqrt((df * (1 - beta)) / beta), tail, df)
   return Math.sqrt((df * (1 - beta)) / beta)
 }
@@ -38,8 +38,8 @@ export function tQuantile(tail: number, df: number): number {
 /** Near beta = 1 the inverse loses digits; one Newton step on the tail brings them back. */
 function polish(start: number, tail: number, df: number): number {
   const logDensity =
-    jStat.gammaln((df + 1) / 2) -
-    jStat.gammaln(df / 2) -
+    gammaln((df + 1) / 2) -
+    gammaln(df / 2) -
     0.5 * Math.log(df * Math.PI) -
     ((df + 1) / 2) * Math.log1p((start * start) / df)
   return start + (tTwoSided(start, df) - tail) / (2 * Math.exp(logDensity))
