@@ -39,6 +39,8 @@ export default defineConfig({
         test: {
           name: 'api',
           environment: 'node',
+          testTimeout: 120_000,
+          hookTimeout: 300_000,
           include: ['tests/api/**/*.test.ts'],
         },
       },

@@ -8,6 +8,7 @@ import { rounds } from './rounds/routes.ts'
 import { seats } from './seats/routes.ts'
 import { table } from './table/routes.ts'
 import { tags } from './tags/routes.ts'
+import { verdicts } from './verdicts/routes.ts'
 
 export const features: readonly Feature[] = [
   account,
@@ -18,5 +19,6 @@ export const features: readonly Feature[] = [
   table,
   seats,
   analysis,
+  verdicts,
   imports,
 ]

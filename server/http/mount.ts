@@ -7,6 +7,7 @@ import { inTransaction } from '../db/transaction.ts'
 import type { Deps } from '../deps.ts'
 import { ApiError } from './api-error.ts'
 import type { Context } from './context.ts'
+import { takePhoto } from '../uploads/photo.ts'
 import { actorOf, sessionHandle } from './current-session.ts'
 import { answeredBefore, keepAnswer } from './idempotency.ts'
 import { readAnswer, readInput } from './parse.ts'
@@ -86,6 +87,7 @@ export function mounter(router: Router, deps: Deps): Mount {
       before.push(signedIn(endpoint.audience))
     if (endpoint.kind === 'json' && endpoint.method !== 'GET')
       before.push(express.json({ limit: endpoint.bodyLimit ?? limits.jsonBytes, strict: true }))
+    if (endpoint.kind === 'upload') before.push(takePhoto)
     router[method](endpoint.path, ...before, async (request: Request, response: Response) => {
       const context = contextOf(deps, endpoint, request, response)
       const input = readInput(endpoint, request)

@@ -108,32 +108,31 @@ export async function openEvening(
 export const anyValue = (seat: number, ordinal: number, line: number): number =>
   (seat * 17 + ordinal * 29 + line * 11) % 101
 
-/** One listener rates what is in hand: digits off the pouch (read from the steward's table), seal, ratings. */
+/** One listener rates what is in hand, the digits read off the steward's table; null where they hold nothing. */
 export async function rateInHand(
   evening: OpenEvening,
   index: number,
   valueOf = anyValue,
-  key = randomUUID(),
+  shown?: table.StewardTable,
 ): Promise<PanelistSeat | null> {
   const listener = evening.listeners[index]
   if (!listener) throw new RangeError('no such listener')
   const { visitor, seat } = listener
-  const before = await visitor.call(seats.getSeat, { params: { seat } })
-  if (before.step !== 'enter-code' || !before.serving) return null
-  const shown = await evening.steward.call(table.getTable, { params: evening.at })
-  const code = shown.seats.find((one) => one.id === seat)?.serving?.code ?? ''
-  const serving = before.serving.id
-  await visitor.call(seats.confirmCode, { params: { seat, serving }, body: { code } })
-  await visitor.call(seats.checkSeal, { params: { seat, serving }, body: { sealed: 'yes' } })
-  const answers = before.scorecard.map((descriptor, line) => ({
+  const seen = shown ?? (await evening.steward.call(table.getTable, { params: evening.at }))
+  const held = seen.seats.find((one) => one.id === seat)?.serving
+  if (held?.state !== 'handed') return null
+  const params = { seat, serving: held.id }
+  await visitor.call(seats.confirmCode, { params, body: { code: held.code } })
+  const { scorecard, serving } = await visitor.call(seats.checkSeal, { params, body: { sealed: 'yes' } })
+  const answers = scorecard.map((descriptor, line) => ({
     descriptor: descriptor.key,
-    value: valueOf(index, before.serving?.ordinal ?? 0, line),
+    value: valueOf(index, serving?.ordinal ?? 0, line),
     cantTell: false,
   }))
   const sent = await visitor.call(seats.submitRatings, {
-    params: { seat, serving },
+    params,
     body: { answers, remark: '' },
-    idempotencyKey: key,
+    idempotencyKey: randomUUID(),
   })
   return sent.seat
 }
@@ -147,7 +146,7 @@ export async function goOn(evening: OpenEvening): Promise<table.StewardTable> {
 /** Plays all turns with everybody rating, to the end questions. */
 export async function playAll(evening: OpenEvening, valueOf = anyValue): Promise<void> {
   for (let state = await goOn(evening); !state.sitting.ended; state = await goOn(evening))
-    for (const index of evening.listeners.keys()) await rateInHand(evening, index, valueOf)
+    await Promise.all(evening.listeners.map((_, index) => rateInHand(evening, index, valueOf, state)))
   for (const { visitor, seat } of evening.listeners)
     await visitor.call(seats.answerEnd, { params: { seat }, body: { recognised: 'none', recognitions: [] } })
 }

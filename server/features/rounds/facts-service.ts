@@ -5,6 +5,7 @@ import { Member } from '#server/models/member.ts'
 import { RoundRole } from '#server/models/round-role.ts'
 import { RoundUnit } from '#server/models/round-unit.ts'
 import type { Round } from '#server/models/round.ts'
+import { Sitting } from '#server/models/sitting.ts'
 import { Unit } from '#server/models/unit.ts'
 
 export const descriptorsOf = (round: Pick<Round, 'scorecardId'>): Promise<Descriptor[]> =>
@@ -51,4 +52,10 @@ export async function turnsBySeat(context: Context, roundId: string): Promise<nu
     { bind: [roundId], type: QueryTypes.SELECT },
   )
   return rows.map((row) => row.turns)
+}
+
+/** Turns that the sitting took; null for an imported round. */
+export async function turnsOfRound(round: Pick<Round, 'id' | 'origin'>): Promise<number | null> {
+  const sitting = round.origin === 'imported' ? null : await Sitting.findOne({ where: { roundId: round.id } })
+  return sitting?.turns ?? null
 }
