@@ -17,7 +17,8 @@ const onlyTables = (units: number, listeners: number) =>
  * - one more for n + 1 listeners (n = 3…6). In n + 1 turns each rests once, and (shown by enumeration for n = 2…6)
  *   positions within one then leave a single plan up to names: the n rotations of one circle. Whoever knew who rests
  *   when could tell which codes are one unit.
- * - with more than six units, whole tables: n for every n listeners begun. (Should a search for rests ever end without
+ * - with more than six units, whole tables: n for every n listeners begun. Should a search for rests ever end without
+ *   positions within one, `drawTurns` falls back to this too: what holds is the `turns` that it returns. (Should a search for rests ever end without
  *   positions within one, `drawTurns` falls back to this too: what holds is the `turns` it returns.)
  */
 export function turnsNeeded(units: number, listeners: number): number {
