@@ -4,7 +4,7 @@ import { drawRound } from '#shared/allocation/draw.ts'
 for (const [units, listeners] of [
   [4, 6],
   [6, 12],
-  [7, 40],
+  [8, 10],
 ] as const) {
   const from = performance.now()
   const result = drawRound({
