@@ -36,6 +36,8 @@ export interface AppOptions {
   mode?: 'demo' | 'live'
   /** Whether the built pages are served too, as browser tests need. */
   pages?: boolean
+  /** What links begin with, where it is not the true address: two applications can then make the same links. */
+  address?: string
   /** Whether a worker takes jobs as they come; otherwise `runJobs` does. */
   worker?: boolean
 }
@@ -56,6 +58,7 @@ export async function startApp(options: AppOptions = {}): Promise<TestApp> {
     DATABASE_URL: database.appUrl,
     DATABASE_OWNER_URL: database.ownerUrl,
     PORT: String(port),
+    ...(options.address ? { SCRIM_ADDRESS: options.address } : {}),
     SCRIM_SECRET: secret,
     SCRIM_LOG: 'silent',
   })
@@ -78,7 +81,7 @@ export async function startApp(options: AppOptions = {}): Promise<TestApp> {
   server.on('request', app.express)
   const worker = options.worker ? startWorker(deps, 100) : undefined
   return {
-    url: env.address,
+    url: `http://127.0.0.1:${port}`,
     deps,
     database,
     owner,

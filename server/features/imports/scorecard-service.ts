@@ -4,10 +4,9 @@ import type { Context } from '#server/http/context.ts'
 import { Descriptor } from '#server/models/descriptor.ts'
 import { Scorecard } from '#server/models/scorecard.ts'
 
+const shipped = [liking, ...lexicon]
 const known = (name: string) =>
-  [liking, ...lexicon].find(
-    (entry) => entry.name.toLocaleLowerCase('en') === name.trim().toLocaleLowerCase('en'),
-  )
+  shipped.find((entry) => entry.name.toLocaleLowerCase('en') === name.trim().toLocaleLowerCase('en'))
 
 /**
  * A scorecard from the file's descriptors. The scale is the file's own range; a descriptor of the lexicon whose scores
@@ -20,7 +19,13 @@ export async function importScorecard(
 ): Promise<{ scorecardId: string; idOf: Map<string, string>; keyOf: Map<string, string> }> {
   const scorecardId = context.deps.random.id()
   await Scorecard.create({ panelId, id: scorecardId, name: 'Imported', createdAt: context.now })
-  const rows = file.descriptors.map((name, place) => {
+  // Overall liking first, then as the lexicon has them, then the file's own.
+  const placeOf = (name: string): number => {
+    const place = shipped.findIndex((entry) => entry === known(name))
+    return place < 0 ? shipped.length : place
+  }
+  const ordered = [...file.descriptors].sort((a, b) => placeOf(a) - placeOf(b))
+  const rows = ordered.map((name, place) => {
     const entry = known(name)
     const range = file.ranges.find((one) => one.name === name) ?? { low: 0, high: 1 }
     const ownScale =
