@@ -12,7 +12,11 @@ const keeperMayMeetTheKey = ['getTags']
 
 const apps: TestApp[] = []
 const freshApp = async (): Promise<TestApp> => {
-  const app = await startApp({ clock: standingClock(), random: seededChance('the same in both'), address: 'http://scrim.test' })
+  const app = await startApp({
+    clock: standingClock(),
+    random: seededChance('the same in both'),
+    address: 'http://scrim.test',
+  })
   apps.push(app)
   return app
 }
