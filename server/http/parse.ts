@@ -30,6 +30,8 @@ export function readInput<E extends Endpoint>(
       fields: faults(query.error),
     })
   const takesBody = endpoint.method !== 'GET' && endpoint.kind === 'json'
+  if (takesBody && request.is('application/json') === false)
+    throw new ApiError('malformed', 'Scrim reads JSON here (Content-Type: application/json).')
   const body = takesBody ? endpoint.body.safeParse(request.body ?? {}) : { success: true as const, data: {} }
   if (!body.success) {
     const fields = faults(body.error)

@@ -1,8 +1,9 @@
 import { z } from 'zod'
 import { limits } from '#shared/domain/limits.ts'
 
-// Control characters but tab and line feed, and the marks that can turn the reading direction of what follows.
-const unseen = /[^\P{Cc}\t\n]|[\u200e\u200f\u202a-\u202e\u2066-\u2069\ufeff]/gu
+// Control characters but tab and line feed, halves of a character, and the marks that can turn the reading direction of
+// what follows.
+const unseen = /[^\P{Cc}\t\n]|\p{Cs}|[\u200e\u200f\u202a-\u202e\u2066-\u2069\ufeff]/gu
 
 const tidy = (text: string): string => text.normalize('NFC').replace(unseen, '').trim()
 
