@@ -112,7 +112,7 @@ export function PlanRows({ rows, turns, ...words }: PlanRowsProps) {
                             className="plan-knot"
                             cx={x(place.turn) + layout.cellWidth / 2}
                             cy={y}
-                            r={4.5}
+                            r={4}
                           />
                         )}
                         {place.label && (

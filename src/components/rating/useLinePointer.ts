@@ -39,6 +39,8 @@ export function useLinePointer(scale: LineScale, answer: Answer, set: (value: nu
     onPointerDown(event: PointerEvent<HTMLElement>) {
       swallowClick.current = false
       if (event.button !== 0 || gesture.current) return
+      // A finger is captured by the browser itself; a mouse may leave the line before its drag is known as one.
+      if (event.pointerType === 'mouse') event.currentTarget.setPointerCapture?.(event.pointerId)
       const box = event.currentTarget.getBoundingClientRect()
       const thumb =
         typeof answer === 'number' ? box.left + shareOf(scale, answer) * box.width - event.clientX : Infinity

@@ -52,7 +52,9 @@ const EDGE = 6
 /** A tick of a raw point and its stacking step, in pixels. */
 export const TICK = 6
 export const TICK_STEP = 7.5
+/** Below a line: the adjusted mean, and more air where the next name stands above its row. */
 const BELOW = 24
+const BELOW_NARROW = 34
 
 export const countWords = (row: Pick<HeardRow, 'n' | 'cantTell'>) =>
   row.cantTell > 0 ? `${row.n} · ${row.cantTell} can’t tell` : `${row.n}`
@@ -79,15 +81,14 @@ export function layOutHeardLine(rows: HeardRow[], scale: HeardScale, width: numb
   })
   const above = 7 + TICK + Math.max(0, ...stacks.flatMap((stack) => stack.levels)) * TICK_STEP
   const laid = stacks.map(({ xs, levels }) => {
-    const nameY = narrow ? y + 17 : 0
-    if (narrow) y += 24
-    const line = y + Math.max(20, above + 4)
-    y = line + BELOW
+    const nameY = y + 15
+    const line = narrow ? y + 20 + Math.max(14, above) : y + Math.max(20, above + 4)
+    y = line + (narrow ? BELOW_NARROW : BELOW)
     return {
       y: line,
       nameY: narrow ? nameY : line + 5,
       points: xs.map((at, nth) => ({ x: at, level: levels[nth] ?? 0 })),
     }
   })
-  return { narrow, x, left, right, words, wordLines: lines, rows: laid, top, height: y }
+  return { narrow, x, left, right, words, wordLines: lines, rows: laid, top, height: narrow ? y - 10 : y }
 }
