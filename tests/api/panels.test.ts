@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { createAccount } from '#shared/contracts/account.ts'
+import { createAccount, getMe } from '#shared/contracts/account.ts'
 import * as contract from '#shared/contracts/panels.ts'
 import type { RoundStatus } from '#shared/domain/round-status.ts'
 import { CallError } from '#src/lib/call.ts'
@@ -212,5 +212,34 @@ describe('the panel’s lists', () => {
       rounds: 1,
     })
     expect(units.find(({ name }) => name === 'Dunlin')?.price).toBeNull()
+  })
+})
+
+describe('what somebody has to do', () => {
+  it('is listed with its page while the round is open, and gone when it is closed', async () => {
+    const { round } = await aRound(6, 'open', { maker: 'Eddy & Shoal', name: 'Godwit' }, [
+      ['ines', 'organiser'],
+      ['ines', 'keeper'],
+      ['wanda', 'steward'],
+    ])
+    const sitting = randomUUID()
+    await sql('insert into sittings (panel_id, id, round_id, name, turns) values ($1, $2, $3, $4, 4)', [
+      panelId,
+      sitting,
+      round,
+      'Tonight',
+    ])
+    const dutiesOf = async (visitor: Visitor) => (await visitor.call(getMe)).duties
+    const at = `/p/quayside-bench/rounds/${round}`
+    expect(await dutiesOf(ines)).toEqual([
+      { role: 'keeper', roundTitle: 'Round 6', path: `${at}/tags/${sitting}` },
+    ])
+    expect(await dutiesOf(wanda)).toEqual([
+      { role: 'steward', roundTitle: 'Round 6', path: `${at}/table/${sitting}` },
+    ])
+    expect(await dutiesOf(stranger)).toEqual([])
+    expect(await dutiesOf(visit(app.url))).toEqual([])
+    await sql(`update rounds set status = 'closed' where id = $1`, [round])
+    expect(await dutiesOf(wanda)).toEqual([])
   })
 })
