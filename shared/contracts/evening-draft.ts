@@ -104,6 +104,13 @@ export const eveningDraft = z
     if (listeners.length < eveningListeners.least) fault(['people'], 'At least two people must listen.')
     if (listeners.length > eveningListeners.most)
       fault(['people'], `At most ${eveningListeners.most} listeners.`)
+    // Two spare rows and three sets of codes: more than 300 codes in one sitting cannot be kept apart.
+    const most = Math.floor(limits.codesInSitting / (3 * draft.units.length)) - limits.spareRows
+    if (draft.tagging !== 'split' && listeners.length > most)
+      fault(
+        ['people'],
+        `With ${draft.units.length} units at most ${most} can listen: there are not enough three-digit codes for more.`,
+      )
     const holding = (duty: string) => draft.people.filter((one) => one.duty === duty)
     const stewards = draft.people.filter((one) => one.steward)
     if (stewards.length !== 1) fault(['people'], 'Choose one steward.')

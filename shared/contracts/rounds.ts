@@ -210,6 +210,8 @@ export const publicRound = z.strictObject({
   planFingerprint: fingerprint,
   keyFingerprint: fingerprint,
   verdictSlug: slug.nullable(),
+  /** A cancelled round opens its key once no open round uses its units. */
+  keyIsPublic: z.boolean(),
 })
 export type PublicRound = z.infer<typeof publicRound>
 export const getPublicRound = endpoint('GET /api/rounds/:round', {
@@ -218,4 +220,12 @@ export const getPublicRound = endpoint('GET /api/rounds/:round', {
   summary: 'The public page of a round',
   params: z.strictObject({ round: id }),
   response: publicRound,
+})
+export const getRoundFile = endpoint('GET /api/rounds/:round/files/:file', {
+  id: 'getRoundFile',
+  audience: 'anyone',
+  summary: 'plan.json or key.json of a cancelled round, once no open round uses its units',
+  params: z.strictObject({ round: id, file: z.enum(['plan.json', 'key.json']) }),
+  response: z.string(),
+  kind: 'file',
 })

@@ -13,6 +13,9 @@ export const limits = {
   passwordMost: 200,
   eveningUnits: { least: 3, most: 6 },
   eveningListeners: { least: 2, most: 24 },
+  /** Codes of one sitting, spares and reserves included. */
+  codesInSitting: 300,
+  spareRows: 2,
   tracks: 12,
   descriptorsMost: 19,
   importBytes: 8 * 1024 * 1024,

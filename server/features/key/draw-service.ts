@@ -1,5 +1,6 @@
 import { drawRound } from '#shared/allocation/draw.ts'
 import { keyFile, planFile } from '#shared/allocation/key-files.ts'
+import { limits } from '#shared/domain/limits.ts'
 import type { Draw, KeyUnit, PlanContent } from '#shared/allocation/types.ts'
 import { ApiError } from '#server/http/api-error.ts'
 import type { Context } from '#server/http/context.ts'
@@ -13,8 +14,6 @@ import { Row } from '#server/models/row.ts'
 import { conceal } from './cipher.ts'
 import { codeHistory } from './history.ts'
 import { withKey } from './with-key.ts'
-
-export const spareRows = 2
 
 export interface Drawn {
   planText: string
@@ -73,7 +72,7 @@ export async function drawAndSeal(
     mode: 'turns',
     units: input.units.map(({ id }) => ({ id })),
     seats: input.seats.map(({ seatRef }) => ({ seatRef })),
-    spares: spareRows,
+    spares: limits.spareRows,
     codePolicy: input.split ? 'split' : 'per-seat',
     history,
   })

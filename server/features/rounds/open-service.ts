@@ -1,4 +1,5 @@
 import { eveningMinutes } from '#shared/domain/timing.ts'
+import { turnsNeeded } from '#shared/allocation/turns.ts'
 import type { Json, KeyUnit } from '#shared/allocation/types.ts'
 import type { EveningDraft } from '#shared/contracts/evening-draft.ts'
 import { drawAndSeal } from '#server/features/key/draw-service.ts'
@@ -6,7 +7,10 @@ import { putOnRecord } from '#server/features/record/service.ts'
 import { announce } from '#server/http/changes.ts'
 import type { Context } from '#server/http/context.ts'
 import { Descriptor } from '#server/models/descriptor.ts'
+import { enqueueMail } from '#server/jobs/queue.ts'
+import { roundOpened } from '#server/mail/templates/round-opened.ts'
 import { Member } from '#server/models/member.ts'
+import { Panel } from '#server/models/panel.ts'
 import { RoundRole } from '#server/models/round-role.ts'
 import { RoundUnit } from '#server/models/round-unit.ts'
 import type { Round } from '#server/models/round.ts'
@@ -15,6 +19,7 @@ import { Seat } from '#server/models/seat.ts'
 import { Serving } from '#server/models/serving.ts'
 import { Sitting } from '#server/models/sitting.ts'
 import { Unit } from '#server/models/unit.ts'
+import { User } from '#server/models/user.ts'
 import { linkHash, linkToken } from './link-service.ts'
 import { readPlan } from './plan.ts'
 
@@ -70,6 +75,7 @@ export async function openDraft(context: Context, round: Round): Promise<void> {
     roundId: round.id,
     facts: { plan: drawn.planFingerprint, key: drawn.keyFingerprint },
   })
+  await mailFingerprints(context, round)
   await announce(context, { round: round.id })
 }
 
@@ -107,7 +113,7 @@ async function frozenPlan(round: Round, draft: EveningDraft) {
     blinding: round.blinding,
     publishesRows: round.publishesRows,
     minutes: eveningMinutes(
-      Math.max(draft.units.length, draft.people.filter((one) => one.listens).length),
+      turnsNeeded(draft.units.length, draft.people.filter((one) => one.listens).length),
       scorecard.length,
     ).total,
   }
@@ -168,4 +174,30 @@ async function linkDuties(context: Context, round: Round): Promise<void> {
   })
   for (const duty of duties)
     await duty.update({ linkHash: linkHash(linkToken(context.deps, 'duty', duty.id, duty.linkVersion)) })
+}
+
+/** Both fingerprints go to everybody with a role in the round who can be written to; no unit is named. */
+async function mailFingerprints(context: Context, round: Round): Promise<void> {
+  const panel = await Panel.findByPk(round.panelId)
+  const held = await RoundRole.findAll({ where: { roundId: round.id } })
+  const members = await Member.findAll({ where: { id: [...new Set(held.map((one) => one.memberId))] } })
+  const users = await User.findAll({
+    where: { id: members.flatMap((one) => (one.userId ? [one.userId] : [])) },
+  })
+  for (const member of members) {
+    const to = users.find((one) => one.id === member.userId)?.email ?? member.email
+    if (!to) continue
+    await enqueueMail(
+      context,
+      roundOpened({
+        to,
+        name: member.displayName,
+        panelName: panel?.name ?? '',
+        roundTitle: round.title,
+        url: `${context.deps.env.address}/rounds/${round.id}`,
+        planFingerprint: round.planFingerprint ?? '',
+        keyFingerprint: round.keyFingerprint ?? '',
+      }),
+    )
+  }
 }

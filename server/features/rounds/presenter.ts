@@ -114,6 +114,7 @@ export const presentPublicRound = (
     scorecard: DescriptorRow[]
     plan: PlanFacts
     verdictSlug: string | null
+    keyIsPublic: boolean
   },
 ): PublicRound => ({
   id: row.id,
@@ -137,4 +138,5 @@ export const presentPublicRound = (
   planFingerprint: row.planFingerprint ?? '',
   keyFingerprint: row.keyFingerprint ?? '',
   verdictSlug: parts.verdictSlug,
+  keyIsPublic: parts.keyIsPublic,
 })

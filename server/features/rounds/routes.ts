@@ -1,6 +1,7 @@
 import * as contract from '#shared/contracts/rounds.ts'
 import { mountEvents } from '#server/http/event-stream.ts'
 import type { Feature } from '#server/http/feature.ts'
+import { cancelledFile } from './cancelled-service.ts'
 import { closeRound } from './close-service.ts'
 import * as service from './service.ts'
 import { viewPublicRound } from './view-service.ts'
@@ -23,5 +24,9 @@ export const rounds: Feature = (mount, router, deps) => {
   }))
   mount(contract.renewLink, ({ params }, context) => service.renewLink(context, params))
   mountEvents(router, deps, contract.roundEvents, (params, context) => service.hearRound(context, params))
+  mount(
+    contract.getRoundFile,
+    ({ params }, context) => cancelledFile(context, params.round, params.file) as never,
+  )
   mount(contract.getPublicRound, ({ params }, context) => viewPublicRound(context, params.round))
 }

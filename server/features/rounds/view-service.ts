@@ -12,6 +12,7 @@ import { Sitting } from '#server/models/sitting.ts'
 import { Verdict } from '#server/models/verdict.ts'
 import * as may from '#server/policies/round.ts'
 import type { RoundAccess } from './access-service.ts'
+import { keyIsPublic } from './cancelled-service.ts'
 import { descriptorsOf, peopleOf, turnsBySeat, unitCountOf, unitsOf } from './facts-service.ts'
 import { readPlan } from './plan.ts'
 import { presentPublicRound, presentRound, type PlanFacts } from './presenter.ts'
@@ -106,6 +107,7 @@ export async function viewPublicRound(context: Context, id: string): Promise<Pub
     scorecard: await descriptorsOf(round),
     plan: planOf(round),
     verdictSlug: isRevealed(round.status) ? await verdictSlugOf(id) : null,
+    keyIsPublic: await keyIsPublic(context, round),
   })
 }
 

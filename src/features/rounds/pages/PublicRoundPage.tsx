@@ -1,12 +1,13 @@
 import { useQuery } from '@tanstack/react-query'
 import { Link, useParams } from 'react-router-dom'
-import type { PublicRound } from '#shared/contracts/rounds.ts'
+import { getRoundFile, type PublicRound } from '#shared/contracts/rounds.ts'
 import { to } from '#src/app/paths.ts'
 import { Asked } from '#src/components/asked/Asked.tsx'
 import { Code } from '#src/components/Code.tsx'
 import { Folio, FolioSection, SelvedgeLines } from '#src/components/layout/Folio.tsx'
 import { Notice } from '#src/components/ui/Notice.tsx'
 import { PageTitle } from '#src/components/ui/PageTitle.tsx'
+import { addressOf } from '#src/lib/call.ts'
 import { counted, sentenceCase } from '#src/lib/counts.ts'
 import { day, moment } from '#src/lib/dates.ts'
 import { Facts } from '../components/Facts.tsx'
@@ -24,6 +25,18 @@ const stateWords = (round: PublicRound): string => {
 
 const levels = (matching: string): string =>
   matching in levelWords ? levelWords[matching as keyof typeof levelWords] : matching
+
+/** A cancelled round's plan and key, for anybody who kept the fingerprints. */
+const CancelledFiles = ({ round }: { round: string }) => (
+  <p>
+    Its codes are spent and no rating is shown. Plan and key are public:{' '}
+    {(['plan.json', 'key.json'] as const).map((file) => (
+      <a key={file} className="mr-3" href={addressOf(getRoundFile, { params: { round, file } })} download>
+        {file}
+      </a>
+    ))}
+  </p>
+)
 
 export default function PublicRoundPage() {
   const { round: id = '' } = useParams()
@@ -57,6 +70,10 @@ export default function PublicRoundPage() {
               <Notice kind={round.cancelledAt ? 'signal' : 'plain'} title={stateWords(round)}>
                 {round.verdictSlug && (
                   <Link to={to('verdict', { slug: round.verdictSlug })}>Read the verdict</Link>
+                )}
+                {round.keyIsPublic && <CancelledFiles round={round.id} />}
+                {round.cancelledAt && !round.keyIsPublic && (
+                  <p>Its key stays shut while an open round uses one of its units.</p>
                 )}
               </Notice>
             </div>
