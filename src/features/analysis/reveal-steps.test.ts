@@ -12,7 +12,8 @@ describe('the reveal, step by step', () => {
 
   it('says codes, maker, name and figures of the unit that has just come out', () => {
     expect(saidAt(exampleReveal, 1)).toEqual({
-      heading: '417 and 528 were Saltmarsh Audio Tern One',
+      heading: 'Saltmarsh Audio Tern One',
+      codes: ['417', '528'],
       detail: 'Width: median 41.0, the middle half between 33.0 and 47.0, six ratings.',
     })
   })
@@ -24,6 +25,7 @@ describe('the reveal, step by step', () => {
   it('ends with the panel’s sentence', () => {
     expect(saidAt(exampleReveal, lastStep(exampleReveal))).toEqual({
       heading: exampleReveal.sentence,
+      codes: [],
       detail: '',
     })
   })

@@ -1,6 +1,6 @@
 import type { Reveal } from '#shared/contracts/analysis.ts'
 import { asPoints, asRange } from '#src/components/results/figures.ts'
-import { counted, listed, numberWord, sentenceCase } from '#src/lib/counts.ts'
+import { counted, numberWord, sentenceCase } from '#src/lib/counts.ts'
 
 /** One step per unit, one more for the panel's sentence; step 0 is all cloth. */
 export const lastStep = (reveal: Pick<Reveal, 'units'>): number => reveal.units.length + 1
@@ -13,6 +13,8 @@ export function stepFrom(asked: string | null, reveal: Pick<Reveal, 'units'>): n
 
 export interface Said {
   heading: string
+  /** The codes a unit went by, each listener's own among them. */
+  codes: readonly string[]
   /** What the room reads below it; empty where the heading says all. */
   detail: string
 }
@@ -23,17 +25,18 @@ export function saidAt(reveal: Reveal, step: number): Said {
   if (step === 0)
     return {
       heading: reveal.title,
+      codes: [],
       detail: `${sentenceCase(numberWord(reveal.units.length))} units, still under the cloth. ${name} is shown.`,
     }
   const unit = reveal.units[step - 1]
-  if (unit === undefined) return { heading: reveal.sentence, detail: '' }
-  const codes =
-    unit.codes.length === 0 ? '' : `${listed(unit.codes)} ${unit.codes.length === 1 ? 'was' : 'were'} `
-  const heading = `${codes}${unit.maker} ${unit.name}`.replace(/^ +/, '')
+  if (unit === undefined) return { heading: reveal.sentence, codes: [], detail: '' }
+  const heading = `${unit.maker} ${unit.name}`
+  const { codes } = unit
   if (unit.median === null || unit.q1 === null || unit.q3 === null)
-    return { heading, detail: `Nobody could rate it on ${name.toLowerCase()}.` }
+    return { heading, codes, detail: `Nobody could rate it on ${name.toLowerCase()}.` }
   return {
     heading,
+    codes,
     detail: `${name}: median ${asPoints(unit.median, scale)}, the middle half ${asRange(unit.q1, unit.q3, scale)}, ${counted(unit.n, 'rating')}.`,
   }
 }

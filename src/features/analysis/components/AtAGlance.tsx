@@ -47,8 +47,8 @@ export function AtAGlance({ results }: { results: DescriptorResult[] }) {
           header: 'Do listeners agree?',
           cell: ({ agreement }) => (
             <>
-              <span className="block">{agreement.sentence}</span>
-              <span className="note block">{figureWords(agreement.single)}</span>
+              <span className="block text-left">{agreement.sentence}</span>
+              <span className="note block text-left">{figureWords(agreement.single)}</span>
             </>
           ),
         },

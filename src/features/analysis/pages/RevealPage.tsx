@@ -59,6 +59,16 @@ function Stage({ reveal, leave }: StageProps) {
     >
       <div aria-live="polite" className="mb-6 min-h-24">
         <p className="display">{said.heading}</p>
+        {said.codes.length > 0 && (
+          <p className="mt-2 flex flex-wrap gap-x-4 text-18">
+            <span className="text-muted">It went by</span>
+            {said.codes.map((code) => (
+              <span key={code} className="font-bold">
+                {code}
+              </span>
+            ))}
+          </p>
+        )}
         {said.detail !== '' && <p className="mt-2 text-18 text-muted">{said.detail}</p>}
       </div>
       <RevealPicture reveal={reveal} drawn={Math.min(step, reveal.units.length)} />

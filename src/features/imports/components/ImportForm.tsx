@@ -43,7 +43,11 @@ export function ImportForm({ panel, text, preview, onStored }: ImportFormProps) 
   })
   const leaveOut = form.watch('leaveOutFaults') ?? false
   return (
-    <form onSubmit={(event) => void submit(event)} noValidate>
+    <form
+      onSubmit={(event) => void submit(event)}
+      noValidate
+      className="mt-12 border-t border-line pt-8 page:pt-12"
+    >
       <FolioSection label="What was read">
         <h2 className="heading mb-3">What was read</h2>
         <WhatWasRead preview={preview} />

@@ -1,9 +1,8 @@
-import { QueryClientProvider } from '@tanstack/react-query'
-import { render, screen, waitFor } from '@testing-library/react'
+import { screen, waitFor } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
-import { MemoryRouter, Route, Routes } from 'react-router-dom'
-import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
-import { createQueryClient } from '#src/lib/query-client.ts'
+import { afterEach, describe, expect, it, vi } from 'vitest'
+import { previewImport, storeImport } from '#shared/contracts/imports.ts'
+import { fakeServer, Refusal, showPage } from '#tests/support/show-page.tsx'
 import { previewOf } from '../preview.ts'
 import ImportPage from './ImportPage.tsx'
 
@@ -16,38 +15,17 @@ Bo,Knot,width,1,1,41
 const withFault = `${good}Cy,Knot,width,1,1,loud\n`
 const round = '11111111-1111-4111-8111-111111111111'
 
-interface Sent {
-  url: string
-  key: string | null
-  body: Record<string, unknown>
+/** A server that reads what the browser reads, and stores unless `refuse` says no. */
+function server(refuse: () => Refusal | null = () => null) {
+  return fakeServer()
+    .on(previewImport, ({ body }) => previewOf((body as { text: string }).text))
+    .on(storeImport, () => refuse() ?? { round })
 }
 
-/** Stands for the server: previews what it is sent, stores on the second try when `failFirst` is set. */
-function standIn({ failFirst = false } = {}) {
-  const stored: Sent[] = []
-  const answer = (status: number, body: unknown) => new Response(JSON.stringify(body), { status })
-  vi.stubGlobal('fetch', async (url: string, init: RequestInit) => {
-    const body = JSON.parse(String(init.body)) as Record<string, unknown>
-    if (url.endsWith('/preview')) return answer(200, previewOf(String(body.text)))
-    stored.push({ url, key: new Headers(init.headers).get('Idempotency-Key'), body })
-    if (failFirst && stored.length === 1) throw new TypeError('network')
-    return answer(200, { round })
+const open = () =>
+  showPage(ImportPage, '/p/:panel/import', '/p/quayside-bench/import', {
+    '/p/:panel/rounds/:round/agreement': 'Agreement is shown',
   })
-  return stored
-}
-
-function open() {
-  render(
-    <QueryClientProvider client={createQueryClient()}>
-      <MemoryRouter initialEntries={['/p/quayside-bench/import']}>
-        <Routes>
-          <Route path="/p/:panel/import" element={<ImportPage />} />
-          <Route path="/p/:panel/rounds/:round/agreement" element={<h1>Agreement is shown</h1>} />
-        </Routes>
-      </MemoryRouter>
-    </QueryClientProvider>,
-  )
-}
 
 const chooseFile = (text: string) =>
   userEvent.upload(
@@ -55,11 +33,17 @@ const chooseFile = (text: string) =>
     new File([text], 'evening.csv', { type: 'text/csv' }),
   )
 
+async function nameIt() {
+  await userEvent.type(await screen.findByLabelText('Title'), 'Two on a Tuesday')
+  await userEvent.type(screen.getByLabelText('Question'), 'Which is wider?')
+}
+const store = () => userEvent.click(screen.getByText('Store the ratings'))
+
 describe('importing ratings', () => {
-  beforeEach(() => void standIn())
   afterEach(() => vi.unstubAllGlobals())
 
   it('shows what was read before anything is stored, and that Scrim reads the same', async () => {
+    const asked = server()
     open()
     await chooseFile(good)
     expect(
@@ -67,57 +51,59 @@ describe('importing ratings', () => {
     ).toBeInTheDocument()
     expect(await screen.findByText(/evening\.csv.*Scrim reads it the same way/)).toBeInTheDocument()
     expect(screen.getByText('Every row can be read.')).toBeInTheDocument()
+    expect(asked.asked('storeImport')).toHaveLength(0)
   })
 
   it('names a bad row by line and reason and stores only when it is left out by choice', async () => {
-    const stored = standIn()
+    const asked = server()
     open()
     await chooseFile(withFault)
     expect(await screen.findByText('Line 6')).toBeInTheDocument()
     expect(screen.getByText(/The score “loud” is not a number/)).toBeInTheDocument()
     expect(screen.getByText(/or leave them out/)).toBeInTheDocument()
-    await userEvent.type(screen.getByLabelText('Title'), 'Two on a Tuesday')
-    await userEvent.type(screen.getByLabelText('Question'), 'Which is wider?')
-    await userEvent.click(screen.getByRole('button', { name: 'Store the ratings' }))
-    expect(stored).toHaveLength(0)
+    await nameIt()
+    await store()
+    expect(asked.asked('storeImport')).toHaveLength(0)
     await userEvent.click(screen.getByLabelText(/^Leave these rows out/))
-    await userEvent.click(screen.getByRole('button', { name: 'Store the ratings' }))
+    await store()
     expect(await screen.findByText('Agreement is shown')).toBeInTheDocument()
-    expect(stored[0]?.body).toMatchObject({
-      leaveOutFaults: true,
-      title: 'Two on a Tuesday',
-      text: withFault,
-    })
+    expect(asked.asked('storeImport')[0]?.body).toMatchObject({ leaveOutFaults: true, text: withFault })
   })
 
   it('sends the same key when storing is tried again, so that it is stored once', async () => {
-    const stored = standIn({ failFirst: true })
+    let tries = 0
+    const asked = server(() =>
+      ++tries === 1 ? new Refusal('unavailable', 'Scrim is away for a moment.') : null,
+    )
     open()
     await chooseFile(good)
-    await userEvent.type(await screen.findByLabelText('Title'), 'Two on a Tuesday')
-    await userEvent.type(screen.getByLabelText('Question'), 'Which is wider?')
-    await userEvent.click(screen.getByRole('button', { name: 'Store the ratings' }))
+    await nameIt()
+    await store()
     expect(await screen.findByText('The file and what you typed are still here.')).toBeInTheDocument()
-    await userEvent.click(screen.getByRole('button', { name: 'Store the ratings' }))
+    await store()
     expect(await screen.findByText('Agreement is shown')).toBeInTheDocument()
-    expect(stored.map((sent) => sent.key)).toEqual([stored[0]?.key, stored[0]?.key])
+    const keys = asked.asked('storeImport').map((one) => one.key)
+    expect(keys).toHaveLength(2)
+    expect(new Set(keys).size).toBe(1)
   })
 
   it('asks for a title and leads to it from the summary', async () => {
+    server()
     open()
     await chooseFile(good)
-    await userEvent.click(await screen.findByRole('button', { name: 'Store the ratings' }))
-    const fault = await screen.findByRole('link', { name: 'Give the round a title.' })
-    await userEvent.click(fault)
+    await screen.findByText('Every row can be read.')
+    await store()
+    await userEvent.click(await screen.findByText('Give the round a title.', { selector: 'a' }))
     await waitFor(() => expect(screen.getByLabelText('Title')).toHaveFocus())
   })
 
   it('reads rows that were pasted', async () => {
+    server()
     open()
     await userEvent.click(screen.getByText('Paste the rows instead'))
     await userEvent.click(screen.getByLabelText('Rows with their header'))
     await userEvent.paste(good)
-    await userEvent.click(screen.getByRole('button', { name: 'Read these rows' }))
+    await userEvent.click(screen.getByText('Read these rows'))
     expect(await screen.findByText(/Read: what you pasted/)).toBeInTheDocument()
   })
 })

@@ -59,7 +59,8 @@ export function UnitFactsForm({ at, unit, nth, currency, today, onUnsaved }: Uni
     <FolioSection label={`Unit ${nth + 1}`} name={unit.name}>
       <form onSubmit={(event) => void submit(event)} noValidate>
         <h2 className="heading">
-          {unit.name} <span className="font-normal text-muted">by {unit.maker}</span>
+          {unit.name}
+          {unit.maker !== '' && <span className="font-normal text-muted"> by {unit.maker}</span>}
         </h2>
         <ErrorSummary errors={atUnit(faults, nth)} attempt={attempt} />
         {problem && <Problem error={problem} kept="What you typed is still here." />}

@@ -38,8 +38,8 @@ export function WordsForm({ at, draft, onUnsaved }: WordsFormProps) {
           <h3>Scrim’s sentences</h3>
           {draft.sentences.length === 0 && <p>Scrim has nothing to state from these numbers.</p>}
           {draft.sentences.map((sentence, nth) => (
-            <p key={nth}>
-              {sentence}
+            <div key={nth}>
+              <p>{sentence}</p>
               <Button
                 kind="secondary"
                 className="text-14"
@@ -48,7 +48,7 @@ export function WordsForm({ at, draft, onUnsaved }: WordsFormProps) {
               >
                 Take as headline
               </Button>
-            </p>
+            </div>
           ))}
           <p>
             These stand on the page beside yours. A sentence that says more than they do is not supported.

@@ -1,0 +1,47 @@
+import type { Round } from '#shared/contracts/rounds.ts'
+import { exampleDraft } from './draft.fixture.ts'
+import { exampleVerdict } from './verdict.fixture.ts'
+
+/** The closed round of the example's verdict, as its organiser sees it. */
+export const exampleRound: Round = {
+  id: exampleDraft.round.id,
+  number: 7,
+  title: exampleVerdict.title,
+  question: exampleVerdict.question,
+  status: 'closed',
+  origin: 'live',
+  blinding: 'single',
+  version: 3,
+  units: exampleVerdict.units.map(({ id, maker, name }) => ({ id, maker, name })),
+  unitCount: 3,
+  people: [],
+  scorecard: exampleVerdict.method.scorecard,
+  primaryDescriptor: exampleVerdict.method.primaryDescriptor,
+  tracks: exampleVerdict.method.tracks,
+  sourceChain: exampleVerdict.method.sourceChain,
+  levelMatching: 'by-ear',
+  hiding: exampleVerdict.method.hiding,
+  publishesRows: true,
+  plan: { turns: 6, minutesPerTurn: 7, minutes: 52, rows: [] },
+  sittingId: null,
+  planFingerprint: exampleVerdict.fingerprints.plan,
+  keyFingerprint: exampleVerdict.fingerprints.key,
+  openedAt: exampleVerdict.method.openedAt,
+  closedAt: exampleVerdict.method.closedAt,
+  cancelReason: null,
+  verdictSlug: null,
+  draft: null,
+  lacks: [],
+  you: { roles: ['organiser'], seatId: null },
+  can: {
+    edit: false,
+    open: false,
+    cancel: false,
+    close: false,
+    handOutLinks: false,
+    steward: false,
+    tag: false,
+    seeAgreement: true,
+    publish: true,
+  },
+}
