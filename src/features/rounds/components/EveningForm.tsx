@@ -1,5 +1,4 @@
 import { useEffect, type ReactNode } from 'react'
-import { useWatch } from 'react-hook-form'
 import { useLocation } from 'react-router-dom'
 import type { EveningDraft, EveningDraftInput } from '#shared/contracts/evening-draft.ts'
 import { Problem } from '#src/components/asked/Problem.tsx'
@@ -9,11 +8,11 @@ import { ErrorSummary } from '#src/components/ui/ErrorSummary.tsx'
 import type { CallError } from '#src/lib/call.ts'
 import type { Kept } from '#src/lib/kept.ts'
 import { useEveningForm } from '../evening/evening-form.ts'
-import { eveningSentence, panelSizeWords } from '../evening/plan-words.ts'
 import { withDuties } from '../evening/share-out-duties.ts'
 import { tidyDraft } from '../evening/tidy-draft.ts'
 import { EveningSections } from './EveningSections.tsx'
 import { PeopleFields } from './PeopleFields.tsx'
+import { SizeWords } from './SizeWords.tsx'
 import { UnitsFields } from './UnitsFields.tsx'
 
 interface EveningFormProps {
@@ -37,12 +36,6 @@ export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal 
     wanted?.focus()
     wanted?.scrollIntoView({ block: 'start' })
   }, [hash])
-  const [units, people, scorecard] = useWatch({
-    control: form.control,
-    name: ['units', 'people', 'scorecard'],
-  })
-  const named = units.filter((unit) => unit.name.trim() !== '').length
-  const listening = people.filter((person) => person.listens && person.name.trim() !== '').length
   const tidyAndSend = () => {
     const tidy = tidyDraft(form.getValues(), known.units)
     form.setValue('units', tidy.units)
@@ -50,7 +43,6 @@ export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal 
     form.setValue('tracks', tidy.tracks)
     return submit()
   }
-  const small = panelSizeWords(listening)
   return (
     <form
       noValidate
@@ -78,14 +70,8 @@ export function EveningForm({ draft, kept, known, send, verb, busyVerb, refusal 
         <PeopleFields {...part} known={known.people} />
       </FolioSection>
       <EveningSections {...part} />
-      <FolioSection
-        label="Then"
-        note={small && listening > 1 ? <p>{small}</p> : undefined}
-        name="Look over the plan"
-      >
-        {named >= 3 && listening >= 2 && (
-          <p className="lead">{eveningSentence(named, listening, scorecard.length)}</p>
-        )}
+      <FolioSection label="Then" name="Look over the plan">
+        <SizeWords form={form} />
         {problem && (
           <div className="mt-4">
             {refusal?.(problem) ?? <Problem error={problem} kept="What you typed is still here." />}

@@ -11,13 +11,13 @@ import { PageTitle } from '#src/components/ui/PageTitle.tsx'
 import { EveningForm } from '../components/EveningForm.tsx'
 import { blankEvening } from '../evening/blank-evening.ts'
 import { keptEvening, takenUp } from '../evening/kept-evening.ts'
-import { repeatKeys } from '../evening/repeat-key.ts'
+import { createSameKey } from '#src/lib/same-key.ts'
 import { membersQuery, panelQuery, unitsQuery, useCreateEvening } from '../queries.ts'
 
 function NewEvening({ panel }: { panel: Panel }) {
   const navigate = useNavigate()
   const kept = useMemo(() => keptEvening(panel.slug), [panel.slug])
-  const keyFor = useMemo(() => repeatKeys(), [])
+  const keyFor = useMemo(() => createSameKey(), [])
   const blank = useMemo(() => blankEvening(panel.you.name, new Date(), panel.timeZone), [panel])
   const [start, setStart] = useState(() => {
     const found = kept.read()
