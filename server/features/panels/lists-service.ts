@@ -1,4 +1,4 @@
-import { QueryTypes } from 'sequelize'
+import { Op, QueryTypes } from 'sequelize'
 import type { Context } from '#server/http/context.ts'
 import { permit } from '#server/http/permit.ts'
 import { Member } from '#server/models/member.ts'
@@ -95,7 +95,8 @@ export async function unitsOfPanel(
 export async function membersOfPanel(context: Context, slug: string): Promise<Member[]> {
   const { panel } = await enterPanel(context, slug)
   return Member.findAll({
-    where: { panelId: panel.id, removedAt: null },
+    // Listeners of an imported file are numbers in a table, not people to write to.
+    where: { panelId: panel.id, removedAt: null, [Op.not]: { roles: { [Op.contains]: ['imported'] } } },
     order: [
       ['displayName', 'asc'],
       ['id', 'asc'],

@@ -153,7 +153,9 @@ async function memberByName(
   besides: string,
 ): Promise<string> {
   const members = await Member.findAll({ where: { panelId, removedAt: null } })
-  const found = members.find((one) => one.id !== besides && same(one.displayName, name))
+  const found = members.find(
+    (one) => one.id !== besides && !one.roles.includes('imported') && same(one.displayName, name),
+  )
   if (found) return found.id
   const made = await Member.create({
     panelId,

@@ -50,7 +50,9 @@ async function spareRow(access: TableAccess): Promise<FreeRow> {
 async function personNamed(context: Context, access: TableAccess, name: string): Promise<Member> {
   const { panel, round } = access
   const known = (await Member.findAll({ where: { panelId: panel.id, removedAt: null } })).find(
-    (one) => one.displayName.toLocaleLowerCase('en') === name.toLocaleLowerCase('en'),
+    (one) =>
+      !one.roles.includes('imported') &&
+      one.displayName.toLocaleLowerCase('en') === name.toLocaleLowerCase('en'),
   )
   if (!known)
     return Member.create({
