@@ -36,6 +36,15 @@ export function familyScreens(scorecard: readonly Descriptor[]): FamilyScreen[] 
   })
 }
 
+/** The families that still follow a screen, each once: "tonal balance", "staging". */
+export function laterFamilies(screens: readonly FamilyScreen[], at: number): string[] {
+  const here = screens[at]?.family
+  const later = screens.slice(at + 1).map(({ family }) => family)
+  return [...new Set(later)]
+    .filter((family) => family !== here)
+    .map((family) => familyNames[family].toLowerCase())
+}
+
 /** "staging", or "staging, 2 of 2": how a verb names a screen. */
 export function screenName(screen: FamilyScreen): string {
   const name = screen.family === 'liking' ? 'overall liking' : familyNames[screen.family].toLowerCase()

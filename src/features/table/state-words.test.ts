@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { servingStates } from '#shared/domain/round-status.ts'
-import { mayVoid, seatState, turnVerb } from './state-words.ts'
+import { mayVoid, seatState, ticksOf, turnVerb } from './state-words.ts'
 import { tableFixture, tableSeat, tableServing } from './table.fixture.ts'
 
 const now = Date.parse('2026-03-12T19:00:00Z')
@@ -46,6 +46,14 @@ describe('what a seat is doing, in the steward’s words', () => {
     const over = { ...sitting, ended: true }
     expect(seatState(tableSeat(1), over, now).words).toBe('at the end questions')
     expect(seatState(tableSeat(1, { endAnswered: true }), over, now).words).toBe('all answered')
+  })
+
+  test('ticks say what was done at the seat, and nothing is ticked before the code was read back', () => {
+    const ticks = (part: Parameters<typeof tableServing>[0]) =>
+      ticksOf(tableSeat(1, { serving: tableServing(part) }))
+    expect(ticks({ state: 'handed', seal: null })).toEqual([])
+    expect(ticks({ state: 'confirmed', seal: null })).toEqual(['code read back'])
+    expect(ticks({ state: 'submitted', seal: 'unsure' })).toEqual(['code read back', 'seal unsure'])
   })
 
   test('only what is handed over or in hand may be set aside', () => {

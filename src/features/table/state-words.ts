@@ -51,6 +51,14 @@ export function seatState(seat: TableSeat, sitting: StewardTable['sitting'], now
   return servingState(seat.serving, now)
 }
 
+/** What is done at a seat in this turn, as ticks: the code was read back, the seal was found. */
+export function ticksOf({ serving }: TableSeat): string[] {
+  if (!serving || (serving.state !== 'confirmed' && serving.state !== 'submitted')) return []
+  return serving.seal === 'yes' || serving.seal === 'unsure'
+    ? ['code read back', serving.seal === 'yes' ? 'seal' : 'seal unsure']
+    : ['code read back']
+}
+
 /** The serving of a seat that may still be set aside: handed over or in hand, not yet sent. */
 export const mayVoid = (seat: TableSeat): boolean =>
   seat.serving !== null && (seat.serving.state === 'handed' || seat.serving.state === 'confirmed')

@@ -26,7 +26,7 @@ interface RatingFamilyProps {
 
 /** One family, at most four lines, the verb at the bottom. */
 export function RatingFamily({ frame, screen, position, answers, onAnswer, next, back }: RatingFamilyProps) {
-  const name = familyNames[screen.family]
+  const name = screen.family === 'liking' ? 'First, as a whole' : familyNames[screen.family]
   const part = screen.parts > 1 ? `, ${screen.part} of ${screen.parts}` : ''
   const then = position.later.length > 0 ? `then ${listed(position.later)}` : 'then a remark'
   return (

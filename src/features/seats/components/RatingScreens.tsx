@@ -1,5 +1,5 @@
 import type { PanelistSeat } from '#shared/contracts/seats.ts'
-import { familyScreens, screenName } from '../family-screens.ts'
+import { familyScreens, laterFamilies, screenName } from '../family-screens.ts'
 import type { Keeping, KeepingState } from '../keeping/keeping.ts'
 import { keptStart, type Change, type KeptServing, type Place } from '../keeping/kept-serving.ts'
 import { keptWords } from '../kept-words.ts'
@@ -37,7 +37,7 @@ export function RatingScreens({ seat, place, keeping, state, kept = keptStart(pl
         key={at}
         frame={frame}
         screen={screen}
-        position={{ at: at + 1, of: screens.length, later: screens.slice(at + 1).map(screenName) }}
+        position={{ at: at + 1, of: screens.length, later: laterFamilies(screens, at) }}
         answers={kept.answers}
         onAnswer={(line, answer) => change({ answers: { [line]: answer } })}
         next={{ name: next ? `Next: ${screenName(next)}` : 'Next: a remark', go: () => go(at + 1) }}

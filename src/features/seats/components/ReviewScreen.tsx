@@ -1,7 +1,7 @@
 import { familyNames } from '#shared/domain/lexicon.ts'
 import { FamilyName } from '#src/components/FamilySign.tsx'
 import { Button } from '#src/components/ui/Button.tsx'
-import { counted } from '#src/lib/counts.ts'
+import { counted, sentenceCase } from '#src/lib/counts.ts'
 import type { FamilyScreen } from '../family-screens.ts'
 import { openLines, type KeptServing } from '../keeping/kept-serving.ts'
 import type { Frame } from './RatingFamily.tsx'
@@ -31,7 +31,9 @@ export function ReviewScreen({
 }: ReviewScreenProps) {
   const open = openLines(frame.seat.scorecard, kept)
   const reason =
-    open.length === 0 ? null : `${counted(open.length, 'line')} still open: answer, or say “I can’t tell”.`
+    open.length === 0
+      ? null
+      : `${sentenceCase(counted(open.length, 'line'))} still open: answer, or say “I can’t tell”.`
   return (
     <SeatFrame
       {...frame}

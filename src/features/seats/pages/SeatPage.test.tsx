@@ -49,7 +49,7 @@ const press = (name: string | RegExp) => userEvent.click(screen.getByRole('butto
 
 /** Answers liking, warmth and width and comes to the last look. */
 async function answerAll() {
-  await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+  await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
   range('Overall liking').focus()
   await userEvent.keyboard('{ArrowRight}{ArrowRight}')
   await press('Next: tonal balance')
@@ -107,7 +107,7 @@ describe('before the first pouch', () => {
     await press('Yes')
     await press('Yes')
     await press('Yes')
-    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+    await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
   })
 })
 
@@ -133,10 +133,10 @@ describe('rating one serving', () => {
   test('a line left open cannot be sent, and the last look says how many are', async () => {
     const { server } = rating()
     show()
-    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+    await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
     for (const verb of ['Next: tonal balance', 'Next: staging', 'Next: a remark', 'Next: a last look'])
       await press(verb)
-    expect(screen.getByText(/three lines still open/)).toBeVisible()
+    expect(screen.getByText(/Three lines still open/)).toBeVisible()
     await press('Send this serving')
     expect(server.asked('submitRatings')).toHaveLength(0)
   })
@@ -144,7 +144,7 @@ describe('rating one serving', () => {
   test('a reload in the middle comes back to the same screen with the same answers', async () => {
     rating()
     const before = show()
-    await screen.findByRole('heading', { level: 1, name: 'Overall liking' })
+    await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
     await press('Overall liking: a step towards like very much')
     await press('Next: tonal balance')
     await screen.findByText('saved on this phone')
