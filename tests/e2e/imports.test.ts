@@ -94,13 +94,11 @@ describe('ratings that somebody already has', () => {
         faults.get(index + 2) ?? `p${index + 1},${index % 2 ? 'Knot' : 'Dunlin'},width,1,1,${index % 100}`,
     )
     const page = await importPage('faults')
-    await page
-      .getByLabel('Ratings file')
-      .setInputFiles({
-        name: 'faults.csv',
-        mimeType: 'text/csv',
-        buffer: Buffer.from(`panelist,unit,descriptor,replicate,position,score\n${lines.join('\n')}\n`),
-      })
+    await page.getByLabel('Ratings file').setInputFiles({
+      name: 'faults.csv',
+      mimeType: 'text/csv',
+      buffer: Buffer.from(`panelist,unit,descriptor,replicate,position,score\n${lines.join('\n')}\n`),
+    })
     await page.getByText('10 faults in the file').waitFor()
     for (const line of faults.keys())
       await expect.poll(() => page.getByText(`Line ${line}`, { exact: true }).count()).toBeGreaterThan(0)
