@@ -46,7 +46,9 @@ function Head({ at, draft, round }: Pick<DeskProps, 'at' | 'draft' | 'round'>) {
       label={<RoundSelvedge panel={at.panel} round={round} shown="published" />}
       note={
         <>
-          <h3>{labelWords(draft.label)}</h3>
+          <p>
+            <strong>{labelWords(draft.label)}</strong>
+          </p>
           {draft.labels.map((label) => (
             <p key={label}>{label}</p>
           ))}

@@ -43,14 +43,18 @@ export function Opening(props: OpeningProps) {
       name="The verdict"
       note={
         <>
-          <h3>Who paid</h3>
+          <p>
+            <strong>Who paid</strong>
+          </p>
           {whoPaid(units).map((line) => (
             <p key={line}>{line}</p>
           ))}
           <p>
             <a href={`#${anchor}`}>All disclosures</a>
           </p>
-          <h3>{few ? label.words : labelWords(label)}</h3>
+          <p>
+            <strong>{few ? label.words : labelWords(label)}</strong>
+          </p>
           {labels.map((line) => (
             <p key={line}>{line}</p>
           ))}

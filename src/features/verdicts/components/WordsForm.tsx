@@ -35,7 +35,9 @@ export function WordsForm({ at, draft, onUnsaved }: WordsFormProps) {
       label="The words"
       note={
         <>
-          <h3>Scrim’s sentences</h3>
+          <p>
+            <strong>Scrim’s sentences</strong>
+          </p>
           {draft.sentences.length === 0 && <p>Scrim has nothing to state from these numbers.</p>}
           {draft.sentences.map((sentence, nth) => (
             <div key={nth}>

@@ -1,5 +1,4 @@
-import { screen, within } from '@testing-library/react'
-import userEvent from '@testing-library/user-event'
+import { screen } from '@testing-library/react'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { getVerdict, listVerdicts, type PublicVerdict } from '#shared/contracts/verdicts.ts'
 import { fakeServer, showPage } from '#tests/support/show-page.tsx'
@@ -44,16 +43,6 @@ describe('a public verdict', () => {
     expect(await screen.findByText('No figures')).toBeInTheDocument()
     expect(screen.queryByText(/heard line/i)).not.toBeInTheDocument()
     expect(screen.queryByText('Liked, median')).not.toBeInTheDocument()
-  })
-
-  it('checks the files in the reader’s own browser and says each check by name', async () => {
-    open({ ...exampleVerdict, fingerprints: { plan: null, key: null, ratings: 'c'.repeat(64) } })
-    await screen.findByRole('heading', { level: 1 })
-    vi.stubGlobal('fetch', () => Promise.resolve(new Response('panelist,unit,descriptor,score\n')))
-    await userEvent.click(screen.getByText('Check it'))
-    const failed = await screen.findByText('1 of 1 checks failed.')
-    const list = failed.nextElementSibling as HTMLElement
-    expect(within(list).getByText(/ratings\.csv has the published fingerprint/)).toHaveTextContent('failed')
   })
 
   it('leads from the short address of a citation to the verdict', async () => {
