@@ -1,27 +1,10 @@
 import { describe, expect, it } from 'vitest'
 import { analyse } from './analyse.ts'
-import type { Analysis, DescriptorAnalysis, LongRating } from './analysis-types.ts'
+import type { DescriptorAnalysis, LongRating } from './analysis-types.ts'
 import { isCannot } from './cannot.ts'
 import { seededRandom } from './random.ts'
+import { oneServing, rowsOf } from '#tests/fixtures/stats/rows.ts'
 
-type Cell = number | null
-/** Listeners × units × servings to rows. */
-const rowsOf = (table: readonly (readonly (readonly Cell[])[])[], descriptor = 'bass'): LongRating[] =>
-  table.flatMap((byUnit, j) =>
-    byUnit.flatMap((servings, u) =>
-      servings.map((score, r) => ({
-        panelist: `L${j + 1}`,
-        unit: 'ABCDEFGH'[u]!,
-        descriptor,
-        replicate: r + 1,
-        position: null,
-        score,
-        cantTell: score === null,
-      })),
-    ),
-  )
-const single = (table: readonly (readonly Cell[])[]): LongRating[] =>
-  rowsOf(table.map((row) => row.map((score) => [score])))
 const bassOf = (rows: readonly LongRating[]): DescriptorAnalysis =>
   analyse(rows, { draws: 0 }).descriptors['bass']!
 
@@ -120,7 +103,7 @@ describe('an analysis', () => {
   })
 
   it('keeps names that JavaScript treats oddly', () => {
-    const odd = single([
+    const odd = oneServing([
       [1, 5],
       [3, 6],
       [2, 9],
@@ -128,161 +111,6 @@ describe('an analysis', () => {
     const found = analyse(odd, { draws: 0 })
     expect(found.order.units).toEqual(['10', '__proto__'])
     expect(Object.keys(found.descriptors['bass']!.units)).toEqual(['10', '__proto__'])
-  })
-})
-
-describe('thin data says so instead of failing', () => {
-  const reasonOf = (value: unknown): string => (isCannot(value) ? value.reason : 'said')
-
-  it('no rows at all', () => {
-    expect(analyse([])).toMatchObject({
-      descriptors: {},
-      order: { descriptors: [], units: [], panelists: [] },
-    })
-  })
-  it('all missing', () => {
-    const found = bassOf(
-      single([
-        [null, null],
-        [null, null],
-      ]),
-    )
-    expect(found.counts).toEqual({ panelists: 0, units: 2, ratings: 0, missingCells: 0, cantTell: 4 })
-    expect(found.units['A']).toMatchObject({
-      n: 0,
-      listeners: 0,
-      cantTell: 2,
-      mean: { ok: false, reason: 'no-ratings' },
-    })
-    expect(reasonOf(found.model)).toBe('no-ratings')
-    expect(reasonOf(found.pairs)).toBe('no-ratings')
-    expect(reasonOf(found.agreement.krippendorffInterval)).toBe('no-pair-of-scores')
-    expect(reasonOf(found.panelists['L1']!.bias)).toBe('no-ratings-by-this-listener')
-  })
-  it('one listener', () => {
-    const found = bassOf(single([[10, 40, 70]]))
-    expect(reasonOf(found.model)).toBe('fewer-than-two-listeners')
-    expect(reasonOf(found.agreement.kendallW)).toBe('fewer-than-two-complete-listeners')
-    expect(reasonOf(found.panelists['L1']!.agreement)).toBe('fewer-than-two-listeners')
-    expect(found.units['A']).toMatchObject({ n: 1, median: 10, sd: { reason: 'fewer-than-two-scores' } })
-  })
-  it('one unit', () => {
-    const found = bassOf(single([[10], [40], [70]]))
-    expect(reasonOf(found.model)).toBe('fewer-than-two-units')
-    expect(reasonOf(found.agreement.icc['ICC(2,1)'])).toBe('fewer-than-two-units')
-    expect(found.units['A']!.median).toBe(40)
-  })
-  it('two listeners have a model; their agreement has no jackknife interval', () => {
-    const found = bassOf(
-      single([
-        [10, 40, 70],
-        [22, 31, 80],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('said')
-    expect(found.agreement.krippendorffInterval).toMatchObject({ lowReason: 'fewer-than-three-listeners' })
-  })
-  it('a listener who gives one rating throughout', () => {
-    const found = bassOf(
-      rowsOf([
-        [
-          [50, 50],
-          [50, 50],
-          [50, 50],
-          [50, 50],
-        ],
-        ...invented.slice(0, 4).map((row) => row.slice(0, 4)),
-      ]),
-    )
-    expect(found.panelists['L1']).toMatchObject({
-      discriminationF: { reason: 'constant-listener' },
-      repeatability: 0,
-      agreement: { reason: 'constant-listener' },
-      slope: 0,
-    })
-    expect(typeof found.panelists['L1']!.bias).toBe('number')
-  })
-  it('the same rating by everybody everywhere', () => {
-    const found = bassOf(
-      single([
-        [50, 50],
-        [50, 50],
-        [50, 50],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('no-variation-left')
-    expect(reasonOf(found.agreement.iccFromModel)).toBe('no-variation')
-    expect(reasonOf(found.agreement.kendallW)).toBe('all-constant')
-    expect(found.units['A']).toMatchObject({ mean: 50, median: 50, sd: 0 })
-  })
-  it('everybody in perfect accord', () => {
-    const found = bassOf(
-      single([
-        [10, 40, 70],
-        [10, 40, 70],
-        [10, 40, 70],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('no-variation-left')
-    expect(found.agreement.krippendorffInterval).toMatchObject({ estimate: 1 })
-    expect(found.agreement.kendallW).toMatchObject({ w: 1 })
-  })
-  it('listeners who differ by a constant only', () => {
-    const found = bassOf(
-      single([
-        [10, 40, 70],
-        [15, 45, 75],
-        [20, 50, 80],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('not-estimable')
-  })
-  it('each listener rated one unit: listener and unit cannot be told apart', () => {
-    const found = bassOf(
-      single([
-        [10, null],
-        [null, 30],
-        [20, null],
-        [null, 50],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('not-estimable')
-    expect(found.counts.missingCells).toBe(4)
-  })
-  it('repeats that are all identical', () => {
-    const found = bassOf(
-      rowsOf([
-        [
-          [10, 10],
-          [40, 40],
-        ],
-        [
-          [20, 20],
-          [60, 60],
-        ],
-        [
-          [15, 15],
-          [20, 20],
-        ],
-      ]),
-    )
-    expect(reasonOf(found.model)).toBe('no-variation-left')
-  })
-  it('a unit that nobody scored is named and the others go on', () => {
-    const found = bassOf(
-      single([
-        [10, 40, null],
-        [22, 31, null],
-        [25, 50, null],
-      ]),
-    )
-    expect(found.counts).toMatchObject({ units: 3, missingCells: 3 })
-    expect(found.units['C']).toMatchObject({ n: 0, adjustedMean: { ok: false, reason: 'no-ratings' } })
-    expect(typeof found.units['A']!.adjustedMean).toBe('number')
-  })
-  it('a score that is no number is a programmer’s error', () => {
-    expect(() => analyse([{ ...single([[1]])[0]!, score: NaN }])).toThrow(RangeError)
-    expect(() => analyse([], { draws: -1 })).toThrow(RangeError)
   })
 })
 
@@ -307,7 +135,7 @@ describe('listeners in an incomplete table', () => {
   })
   it('need four units for correlation and slope', () => {
     const found = bassOf(
-      single([
+      oneServing([
         [10, 40, 70, null],
         [22, 31, 80, 50],
         [25, 50, 60, 41],
@@ -319,7 +147,7 @@ describe('listeners in an incomplete table', () => {
   })
   it('still have their others where they alone rated a unit', () => {
     const found = bassOf(
-      single([
+      oneServing([
         [10, 40, 70, 33],
         [22, 31, 80, null],
         [25, 50, 60, null],
@@ -327,40 +155,5 @@ describe('listeners in an incomplete table', () => {
       ]),
     )
     expect(typeof found.panelists['L1']!.bias).toBe('number')
-  })
-})
-
-describe('agreement from the model', () => {
-  const agreementOf = (found: Analysis) => {
-    const said = found.descriptors['bass']!.agreement.iccFromModel
-    if (isCannot(said)) throw new Error(said.reason)
-    return said
-  }
-  it('is ICC(2,1) with its interval on a complete table without repeats', () => {
-    const rows = single([
-      [9, 6, 8, 7, 10, 6],
-      [2, 1, 4, 1, 5, 2],
-      [5, 3, 6, 2, 6, 4],
-      [8, 2, 8, 6, 9, 7],
-    ])
-    const said = agreementOf(analyse(rows, { draws: 0 }))
-    // Shrout & Fleiss 1979: .29 (.018787, .761084), average .62, consistency .71.
-    expect(said.single).toBeCloseTo(0.289764, 6)
-    expect(said.singleLow).toBeCloseTo(0.018787, 6)
-    expect(said.singleHigh).toBeCloseTo(0.761084, 6)
-    expect(said.average).toBeCloseTo(0.620051, 6)
-    expect(said.averageLow).toBeCloseTo(0.071137, 5)
-    expect(said.averageHigh).toBeCloseTo(0.927232, 5)
-    expect(said.consistency).toBeCloseTo(0.714841, 6)
-  })
-  it('its general interval passes into Shrout and Fleiss’s as the table fills up', () => {
-    const table = Array.from({ length: 12 }, (_, j) => invented[j % 9]!.map(([a, b]) => (j < 9 ? a! : b!)))
-    const full = agreementOf(analyse(single(table), { draws: 0 }))
-    const holed = agreementOf(
-      analyse(single(table.map((row, j) => (j === 0 ? [null, ...row.slice(1)] : row))), { draws: 0 }),
-    )
-    expect(holed.singleMethod).not.toBe(full.singleMethod)
-    expect(Math.abs(Number(holed.singleLow) - Number(full.singleLow))).toBeLessThan(0.06)
-    expect(Math.abs(Number(holed.singleHigh) - Number(full.singleHigh))).toBeLessThan(0.06)
   })
 })

@@ -8,6 +8,7 @@ import { fitAllRandom } from './mixed-model/all-random.ts'
 import type { RandomComponents } from './mixed-model/all-random.ts'
 import { invertPositive, times, dot } from './mixed-model/cholesky.ts'
 import type { MixedFit } from './mixed-model/fit.ts'
+import { sumOfSquares } from './moments.ts'
 
 /**
  * Agreement from the all-random model: of one listener with one serving (absolute), of the panel's mean, and of one
@@ -33,7 +34,7 @@ export function iccFromModel(
   fixed: MixedFit | Cannot,
   shroutFleiss: IccEstimate | Cannot | null,
 ): IccFromModel | Cannot {
-  const random = fitAllRandom(table)
+  const random = fitAllRandom(table, isCannot(fixed) ? undefined : [unitRatio(fixed), ...fixed.ratios])
   if (isCannot(random)) return random
   const { unit, panelist, interaction = 0, residual } = random
   const single = unit / (unit + panelist + interaction + residual)
@@ -70,6 +71,12 @@ export function iccFromModel(
       residual,
     },
   }
+}
+
+/** Spread of the adjusted means over the residual: where the search for the unit's variance begins. */
+function unitRatio({ data, kenwardRoger, residual }: MixedFit): number {
+  const means = [...data.centre].map((centre, unit) => centre + data.scale * kenwardRoger.effects[unit]!)
+  return sumOfSquares(means) / (means.length - 1) / residual
 }
 
 /** Variance of a unit's mean over the panel: (σ²p + σ²pu)/h + σ²e/g. */

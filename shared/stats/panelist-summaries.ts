@@ -19,6 +19,7 @@ export function panelistSummaries(
   fit: MixedFit | Cannot,
 ): Record<string, PanelistSummary> {
   const complete = isComplete(table)
+  const withoutHim = meansWithoutListener(table, isCannot(fit) ? null : fit, complete)
   const scores = scoresByListener(data)
   const rowOf = new Map(data.scoredPanelists.map((name, i) => [name, i]))
   return Object.fromEntries(
@@ -28,7 +29,7 @@ export function panelistSummaries(
       if (row === undefined) return [panelist, nothingSaid(cantTell)]
       const byUnit = scores[row]!
       const own = discrimination(byUnit, FEWEST_ERROR_DF)
-      const rest = meansWithoutListener(table, isCannot(fit) ? null : fit, complete, row)
+      const rest = withoutHim(row)
       const units = rest.flatMap((value, unit) => (value !== null && byUnit[unit]!.length > 0 ? [unit] : []))
       const compared =
         units.length === 0

@@ -1,83 +1,62 @@
-import type { CellTable } from './cell-table.ts'
 import { isCannot } from './cannot.ts'
-import { addListener } from './mixed-model/blocks.ts'
-import type { Block, ReducedData } from './mixed-model/blocks.ts'
+import type { CellTable } from './cell-table.ts'
 import { fitMixedModel, fitReduced } from './mixed-model/fit.ts'
 import type { MixedFit } from './mixed-model/fit.ts'
+import { withoutListener } from './mixed-model/one-listener.ts'
+import { sharedRefits } from './shared-refits.ts'
+
+/** From this many listeners on, refits share their sums (see `sharedRefits`). */
+const SHARED_FROM = 40
 
 /**
  * What the rest of the panel makes of each unit without one listener, in points: plain means of cell means in a complete
  * table, adjusted means of the model refitted without him in an incomplete one. Null where nobody else rated a unit, or
- * the rest is too thin for a model.
- *
- * Cost: units, or one refit from near by.
+ * the rest is too thin for a model. Cost: units in a complete table, else a refit each.
  *
  * @param fit the model with everybody, where there is one
  * @param complete every listener scored every unit
+ * @returns for a listener's row, one figure for each unit
  */
 export function meansWithoutListener(
   table: CellTable,
   fit: MixedFit | null,
   complete: boolean,
-  listener: number,
-): (number | null)[] {
-  if (complete) return plainMeans(table, listener)
-  const raters = Array.from({ length: table.units }, (_, unit) => others(table, listener, unit))
-  if (!fit || fit.positions > 1 || raters.some((count) => count === 0)) {
-    return afterDroppingUnits(table, listener, raters)
+): (listener: number) => (number | null)[] {
+  if (complete) return plainMeans(table)
+  const raters = ratersOf(table)
+  const plain = fit?.positions === 1 ? fit : null
+  const shared = plain && table.listeners >= SHARED_FROM ? sharedRefits(table, plain) : null
+  return (listener) => {
+    const left = raters.map((count, unit) => count - Math.min(1, table.count[listener * table.units + unit]!))
+    if (!plain || left.some((count) => count === 0)) return afterDroppingUnits(table, listener, left)
+    const quick = shared?.(listener)
+    if (quick) return quick
+    const data = withoutListener(plain.data, table, listener)
+    const repeated = data.observations > data.cells
+    const again = fitReduced(data, repeated, 1, plain.ratios.slice(0, repeated ? 2 : 1))
+    return isCannot(again) ? raters.map(() => null) : unitMeans(again)
   }
-  const data = reducedWithout(fit.data, table, listener)
-  const repeated = data.observations > data.cells
-  const again = fitReduced(data, repeated, 1, fit.ratios.slice(0, repeated ? 2 : 1))
-  if (isCannot(again)) return raters.map(() => null)
-  return unitMeans(again)
 }
 
 const unitMeans = (fit: MixedFit): number[] =>
   [...fit.data.centre].map((centre, unit) => centre + fit.data.scale * fit.kenwardRoger.effects[unit]!)
 
-function plainMeans(table: CellTable, listener: number): (number | null)[] {
-  return Array.from({ length: table.units }, (_, unit) => {
-    let total = 0
-    for (let other = 0; other < table.listeners; other++) {
-      if (other !== listener) total += table.mean[other * table.units + unit]!
-    }
-    return table.listeners > 1 ? total / (table.listeners - 1) : null
+function plainMeans(table: CellTable): (listener: number) => (number | null)[] {
+  const totals = new Float64Array(table.units)
+  table.mean.forEach((mean, cell) => (totals[cell % table.units]! += mean))
+  const others = table.listeners - 1
+  return (listener) =>
+    [...totals].map((total, unit) =>
+      others > 0 ? (total - table.mean[listener * table.units + unit]!) / others : null,
+    )
+}
+
+function ratersOf(table: CellTable): number[] {
+  const raters = new Array<number>(table.units).fill(0)
+  table.count.forEach((count, cell) => {
+    if (count > 0) raters[cell % table.units]!++
   })
-}
-
-function others(table: CellTable, listener: number, unit: number): number {
-  let count = 0
-  for (let other = 0; other < table.listeners; other++) {
-    if (other !== listener && table.count[other * table.units + unit]! > 0) count++
-  }
-  return count
-}
-
-function reducedWithout(data: ReducedData, table: CellTable, listener: number): ReducedData {
-  const place = data.member[listener]!
-  const old = data.blocks[place]!
-  const block: { -readonly [K in keyof Block]: Block[K] } = {
-    ...old,
-    size: old.size - 1,
-    sum: old.sum.slice(),
-    products: old.products.slice(),
-  }
-  const y = [...old.unit].map(
-    (unit) => (table.mean[listener * table.units + unit]! - data.centre[unit]!) / data.scale,
-  )
-  addListener(block, y, -1)
-  const blocks = [...data.blocks]
-  if (block.size > 0) blocks[place] = block
-  else blocks.splice(place, 1)
-  return {
-    ...data,
-    blocks,
-    observations: data.observations - old.servings.reduce((total, n) => total + n, 0),
-    cells: data.cells - old.unit.length,
-    listeners: data.listeners - 1,
-    withinYY: data.withinYY - table.within[listener]! / data.scale ** 2,
-  }
+  return raters
 }
 
 /** A new table without the listener and without units that only he rated, fitted from the start. */

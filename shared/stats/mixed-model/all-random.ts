@@ -29,8 +29,10 @@ export interface RandomComponents {
  * came. Never below zero. Cost: linear in listeners, units³ a step.
  *
  * Source: Patterson & Thompson 1971; the unit's column joins by Woodbury's identity.
+ *
+ * @param start ratios over the residual to start from: unit, panelist and, with repeats, listener × unit
  */
-export function fitAllRandom(table: CellTable): RandomComponents | Cannot {
+export function fitAllRandom(table: CellTable, start?: readonly number[]): RandomComponents | Cannot {
   if (table.listeners < 2) return cannot(table.listeners === 0 ? 'no-ratings' : 'fewer-than-two-listeners')
   if (table.units < 2) return cannot('fewer-than-two-units')
   const { centre, scale } = overallCentre(table)
@@ -39,7 +41,7 @@ export function fitAllRandom(table: CellTable): RandomComponents | Cannot {
   const withInteraction = hasRepeats(table)
   if (data.observations < (withInteraction ? 5 : 4)) return cannot('not-estimable')
   if (withInteraction && data.withinYY < 1e-18) return cannot('no-variation-left')
-  const ratios = searchRatios((at) => allRandomCriterion(data, at), withInteraction ? 3 : 2)
+  const ratios = searchRatios((at) => allRandomCriterion(data, at), withInteraction ? 3 : 2, start)
   const found = ratios && allRandomCriterion(data, ratios)
   if (!found) return cannot('not-estimable')
   const variance = (ratio: number): number => ratio * found.residual * scale * scale
@@ -64,7 +66,6 @@ function allRandomCriterion(data: ReducedData, ratios: readonly number[]): AllRa
   const size = data.units
   const base = crossProducts(data, { panelist, interaction, residual: 1 })
   const widened = base.xx.map((value, e) => unit * value + (e % (size + 1) === 0 ? 1 : 0))
-  // I + γM has the same determinant and inverse through M's symmetric root; M itself may be singular by rounding only.
   const inverse = invertPositive(widened, size)
   if (!inverse) return null
   const b = inverse.inverse

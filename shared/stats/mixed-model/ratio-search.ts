@@ -7,7 +7,8 @@ export interface Criterion {
 
 export type CriterionOf = (ratios: readonly number[]) => Criterion | null
 
-const GRID = [0.05, 0.4, 1.2, 4]
+/** Roots of ratios from which the search begins. */
+const GRID = [0.2, 0.6, 1.8]
 const TOLERANCE = 1e-7
 
 /**
@@ -24,10 +25,7 @@ export function searchRatios(
   dimensions: number,
   start?: readonly number[],
 ): number[] | null {
-  const inTheta = (theta: readonly number[]): Criterion | null => {
-    const found = criterion(theta.map((value) => value * value))
-    return found && { value: found.value, slope: found.slope.map((s, i) => 2 * (theta[i] ?? 0) * s) }
-  }
+  const inTheta = inRoots(criterion)
   const first = start
     ? start.map((ratio) => Math.sqrt(Math.max(ratio, 1e-4)))
     : bestOfGrid(inTheta, dimensions)
@@ -38,6 +36,14 @@ export function searchRatios(
     theta.map((value) => value * value),
   )
 }
+
+/** The same criterion as a function of θ = √γ. */
+export const inRoots =
+  (criterion: CriterionOf): CriterionOf =>
+  (theta) => {
+    const found = criterion(theta.map((value) => value * value))
+    return found && { value: found.value, slope: found.slope.map((s, i) => 2 * theta[i]! * s) }
+  }
 
 function bestOfGrid(criterion: CriterionOf, dimensions: number): number[] | null {
   let best: number[] | null = null
@@ -86,7 +92,11 @@ const steepest = (at: Criterion, theta: readonly number[]): number =>
 
 /** H⁻¹g with H made positive by flooring its pivots (at most three dimensions). */
 function newtonStep(criterion: CriterionOf, theta: number[], here: Criterion): number[] {
-  const size = theta.length
+  return downhill(curvature(criterion, theta), here.slope)
+}
+
+/** Second derivatives by central differences of the slope. */
+export function curvature(criterion: CriterionOf, theta: readonly number[]): number[][] {
   const hessian = theta.map((value, i) => {
     const width = 1e-4 * Math.max(1, Math.abs(value))
     const shifted = (by: number): readonly number[] | undefined =>
@@ -95,22 +105,24 @@ function newtonStep(criterion: CriterionOf, theta: number[], here: Criterion): n
     const down = shifted(-width)
     return theta.map((_, j) => (up && down ? (up[j]! - down[j]!) / (2 * width) : i === j ? 1 : 0))
   })
-  for (let i = 0; i < size; i++) {
-    for (let j = 0; j < i; j++) {
-      const both = (hessian[i]![j]! + hessian[j]![i]!) / 2
-      hessian[i]![j] = both
-      hessian[j]![i] = both
-    }
-  }
+  return hessian.map((row, i) => row.map((value, j) => (value + hessian[j]![i]!) / 2))
+}
+
+/** Step H⁻¹g, with as much added to H's diagonal as makes it point downhill. */
+export function downhill(hessian: readonly (readonly number[])[], slope: readonly number[]): number[] {
   for (let ridge = 0, tries = 0; tries < 60; tries++) {
-    const step = solvePositive(hessian, ridge, here.slope)
+    const step = solvePositive(hessian, ridge, slope)
     if (step) return step
     ridge = ridge === 0 ? 1e-3 * Math.max(1e-6, ...hessian.map((row, i) => Math.abs(row[i]!))) : ridge * 4
   }
-  return [...here.slope]
+  return [...slope]
 }
 
-function solvePositive(hessian: number[][], ridge: number, slope: readonly number[]): number[] | null {
+function solvePositive(
+  hessian: readonly (readonly number[])[],
+  ridge: number,
+  slope: readonly number[],
+): number[] | null {
   const size = slope.length
   const a = hessian.map((row, i) => [...row.map((value, j) => value + (i === j ? ridge : 0)), slope[i]!])
   for (let i = 0; i < size; i++) {

@@ -1,6 +1,7 @@
 import type { ReducedData } from './blocks.ts'
 import { dot, invertPositive, times, traceOfProduct } from './cholesky.ts'
 import { crossProducts } from './cross-products.ts'
+import type { ProductsAndDerivatives } from './cross-products.ts'
 import type { Criterion } from './ratio-search.ts'
 
 export interface FixedUnitCriterion extends Criterion {
@@ -17,9 +18,18 @@ export interface FixedUnitCriterion extends Criterion {
 export function fixedUnitCriterion(data: ReducedData, ratios: readonly number[]): FixedUnitCriterion | null {
   const [panelist = 0, interaction = 0] = ratios
   const products = crossProducts(data, { panelist, interaction, residual: 1 })
-  const size = data.columns
+  return criterionFrom(products, data.observations, ratios)
+}
+
+/** The same from products already summed at these ratios. */
+export function criterionFrom(
+  products: ProductsAndDerivatives,
+  observations: number,
+  ratios: readonly number[],
+): FixedUnitCriterion | null {
+  const size = products.xy.length
   const inverse = invertPositive(products.xx, size)
-  const free = data.observations - size
+  const free = observations - size
   if (!inverse || free < 1) return null
   const effects = times(inverse.inverse, products.xy, size)
   const left = products.yy - dot(effects, products.xy)
