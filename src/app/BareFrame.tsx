@@ -1,4 +1,5 @@
 import { Outlet, ScrollRestoration } from 'react-router-dom'
+import { Arriving } from './Arriving.tsx'
 import { DemoWords, useIsDemo } from './DemoBar.tsx'
 
 /** The frame of pages that bring their own: the threshold, a seat, the stage. */
@@ -11,6 +12,7 @@ export function BareFrame() {
           <DemoWords />
         </div>
       )}
+      <Arriving />
       <Outlet />
       <ScrollRestoration />
     </>

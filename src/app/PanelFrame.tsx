@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query'
 import { Outlet, ScrollRestoration, useParams } from 'react-router-dom'
 import { meQuery } from '#src/lib/me.ts'
+import { Arriving } from './Arriving.tsx'
 import { DemoWords } from './DemoBar.tsx'
 import { PanelLayout } from './layouts/PanelLayout.tsx'
 import { to } from './paths.ts'
@@ -24,6 +25,7 @@ export function PanelFrame() {
       links={own ? places : []}
       who={me && <Who me={me} panel={own?.name} />}
     >
+      <Arriving />
       <Outlet />
       <ScrollRestoration />
     </PanelLayout>

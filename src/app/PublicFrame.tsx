@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query'
 import { Outlet, ScrollRestoration } from 'react-router-dom'
 import { meQuery } from '#src/lib/me.ts'
+import { Arriving } from './Arriving.tsx'
 import { DemoWords } from './DemoBar.tsx'
 import { PublicLayout } from './layouts/PublicLayout.tsx'
 import { to } from './paths.ts'
@@ -20,6 +21,7 @@ export function PublicFrame() {
       ]}
       who={me && <Who me={me} />}
     >
+      <Arriving />
       <Outlet />
       <ScrollRestoration />
     </PublicLayout>

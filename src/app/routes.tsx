@@ -1,6 +1,7 @@
 import type { ComponentType } from 'react'
 import type { RouteObject } from 'react-router-dom'
 import { paths } from './paths.ts'
+import { FirstLoad } from './Arriving.tsx'
 import { BareFrame } from './BareFrame.tsx'
 import { ErrorPage } from './ErrorPage.tsx'
 import { NotFoundPage } from './NotFoundPage.tsx'
@@ -18,6 +19,7 @@ const page = (path: string, load: () => Promise<Page>): RouteObject => ({
 const framed = (frame: ComponentType, children: RouteObject[]): RouteObject => ({
   Component: frame,
   ErrorBoundary: ErrorPage,
+  HydrateFallback: FirstLoad,
   children: [{ ErrorBoundary: ErrorPage, children }],
 })
 
