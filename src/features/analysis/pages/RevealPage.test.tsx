@@ -1,5 +1,5 @@
 import { screen } from '@testing-library/react'
-import userEvent from '@testing-library/user-event'
+import { userEvent } from '@testing-library/user-event'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { getReveal } from '#shared/contracts/analysis.ts'
 import { fakeServer, showPage } from '#tests/support/show-page.tsx'

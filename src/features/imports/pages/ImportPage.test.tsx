@@ -1,5 +1,5 @@
 import { screen, waitFor } from '@testing-library/react'
-import userEvent from '@testing-library/user-event'
+import { userEvent } from '@testing-library/user-event'
 import { afterEach, describe, expect, it, vi } from 'vitest'
 import { previewImport, storeImport } from '#shared/contracts/imports.ts'
 import { fakeServer, Refusal, showPage } from '#tests/support/show-page.tsx'
