@@ -32,6 +32,7 @@ export default tseslint.config(
     files: ['server/**', 'scripts/**', 'tests/**', '*.config.*', '.ci/**'],
     languageOptions: { globals: { ...globals.node } },
   },
+  { files: ['public/**'], languageOptions: { globals: { ...globals.browser } } },
   { files: ['scripts/**', 'server/index.ts', 'tests/e2e/**'], rules: { 'no-console': 'off' } },
   ...importRules,
 )

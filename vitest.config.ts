@@ -7,7 +7,7 @@ export default defineConfig({
   plugins: [react()],
   test: {
     maxWorkers: 2,
-    testTimeout: 30_000,
+    testTimeout: 60_000,
     hookTimeout: 60_000,
     globalSetup: ['tests/support/global-setup.ts'],
     projects: [
