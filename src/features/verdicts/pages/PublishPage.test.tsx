@@ -30,7 +30,7 @@ function open(draft: VerdictDraft = exampleDraft) {
       panels: [{ slug: 'quayside-bench', name: 'The Quayside Bench', roles: [] }],
       seats: [],
       duties: [],
-      mode: 'live',
+      mode: 'live' as const,
       mailSends: false,
     }))
     .on(getRound, () => exampleRound)
