@@ -23,7 +23,7 @@ const writes = endpoints.filter(({ method }) => method !== 'GET')
 
 function send(
   endpoint: Endpoint,
-  body: string | Buffer,
+  body: string | Uint8Array<ArrayBuffer>,
   headers: Record<string, string> = {},
 ): Promise<Response> {
   return ines.fetch(addressFor(endpoint), {
@@ -55,7 +55,11 @@ describe('a write', () => {
   })
 
   it('passes on either sign alone', async () => {
-    for (const sign of [{ Origin: app.url }, { Origin: '', 'Sec-Fetch-Site': 'same-origin' }]) {
+    const signs: Record<string, string>[] = [
+      { Origin: app.url },
+      { Origin: '', 'Sec-Fetch-Site': 'same-origin' },
+    ]
+    for (const sign of signs) {
       const answer = await visit(app.url).fetch('/api/session', {
         method: 'DELETE',
         headers: { ...json, ...sign },

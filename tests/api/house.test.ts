@@ -26,7 +26,7 @@ const jsonWrites = endpoints.filter(({ method, kind }) => method !== 'GET' && ki
 
 function send(
   endpoint: Endpoint,
-  body: string | Buffer,
+  body: string | Uint8Array<ArrayBuffer>,
   headers: Record<string, string> = {},
 ): Promise<Response> {
   return ines.fetch(addressFor(endpoint), {
