@@ -29,7 +29,7 @@ export async function importScorecard(
     const entry = known(name)
     const range = file.ranges.find((one) => one.name === name) ?? { low: 0, high: 1 }
     const ownScale =
-      entry && range.low >= 0 && range.high <= 100
+      entry && range.low >= 0 && range.high <= 100 && range.high > 20
         ? { low: 0, high: 100 }
         : { low: range.low, high: range.high > range.low ? range.high : range.low + 1 }
     return {
