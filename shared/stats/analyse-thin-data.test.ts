@@ -152,6 +152,18 @@ describe('thin data says so instead of failing', () => {
     expect(reasonOf(found.model)).toBe('not-estimable')
     expect(found.counts.missingCells).toBe(4)
   })
+  it('listeners who hang together by single units only: nothing is left to measure an error by', () => {
+    const found = bassOf(
+      oneServing([
+        [null, null, null, 30, 10],
+        [10, null, null, 30, null],
+        [0, 40, null, null, null],
+        [10, null, 10, null, null],
+      ]),
+    )
+    expect(reasonOf(found.model)).toBe('not-estimable')
+    expect(found.units['A']!.median).toBe(10)
+  })
   it('repeats that are all identical', () => {
     const found = bassOf(
       rowsOf([

@@ -93,12 +93,9 @@ describe('an analysis', () => {
     expect(renamed.panelists['x9']!.bias).toBeCloseTo(named.panelists['L1']!.bias as number, 6)
     if (isCannot(renamed.model) || isCannot(named.model)) throw new Error('expected models')
     expect(renamed.model.remlCriterion).toBeCloseTo(named.model.remlCriterion, 8)
-    const pair = (renamed.pairs as { a: string; b: string; difference: number }[]).find(
-      ({ a, b }) => a === 'Y' && b === 'Z',
-    )!
-    const same = (named.pairs as { a: string; b: string; difference: number }[]).find(
-      ({ a, b }) => a === 'A' && b === 'B',
-    )!
+    if (isCannot(renamed.pairs) || isCannot(named.pairs)) throw new Error('expected pairs')
+    const pair = renamed.pairs.find(({ a, b }) => a === 'Y' && b === 'Z')!
+    const same = named.pairs.find(({ a, b }) => a === 'A' && b === 'B')!
     expect(pair.difference).toBeCloseTo(-same.difference, 8)
   })
 

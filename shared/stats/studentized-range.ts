@@ -38,31 +38,42 @@ export function rangeQuantile(upper: number, means: number, df: number): number 
   if (!(upper > 0 && upper < 1)) throw new RangeError(`studentized range: tail ${upper}`)
   if (means === 2) return Math.SQRT2 * tQuantile(upper, df)
   const tail = normalRangeTail(means)
-  // The quantile lies below Bonferroni's over all pairs and above that of one pair.
-  let low = Math.SQRT2 * tQuantile(upper, df)
-  let high = Math.SQRT2 * tQuantile((2 * upper) / (means * (means - 1)), df)
-  let atLow = Math.log(averaged(low, tail, df) / upper)
-  let atHigh = Math.log(averaged(high, tail, df) / upper)
-  for (let round = 0; round < 100 && high - low > 1e-12 * high && atLow > 0 && atHigh < 0; round++) {
-    const middle = round % 3 === 2 ? (low + high) / 2 : low + ((high - low) * atLow) / (atLow - atHigh)
-    const at = Math.log(averaged(middle, tail, df) / upper)
-    if (Math.abs(at) < 1e-12) return middle
-    if (at > 0) [low, atLow] = [middle, at]
-    else [high, atHigh] = [middle, at]
+  // The quantile lies below Bonferroni's over all pairs and above that of one pair. In logarithms the tail is nearly a
+  // line, on which the Illinois form of false position settles in a few steps.
+  let low = Math.log(Math.SQRT2 * tQuantile(upper, df))
+  let high = Math.log(Math.SQRT2 * tQuantile((2 * upper) / (means * (means - 1)), df))
+  const excess = (x: number): number => Math.log(averaged(Math.exp(x), tail, df) / upper)
+  let atLow = excess(low)
+  let atHigh = excess(high)
+  let before = 0
+  for (let round = 0; round < 100 && atLow > 0 && atHigh < 0; round++) {
+    const middle = low + ((high - low) * atLow) / (atLow - atHigh)
+    const at = excess(middle)
+    if (Math.abs(at) < 1e-11 || high - low < 1e-13) return Math.exp(middle)
+    if (at > 0) {
+      low = middle
+      atLow = at
+      if (before > 0) atHigh /= 2
+    } else {
+      high = middle
+      atHigh = at
+      if (before < 0) atLow /= 2
+    }
+    before = at
   }
-  return atLow > 0 ? (low + high) / 2 : low
+  return Math.exp(atLow > 0 ? high : low)
 }
 
 /** Mean of tail(q·s) over s = χ/√df. */
 function averaged(q: number, tail: (w: number) => number, df: number): number {
-  const step = Math.min(0.06, 0.3 / Math.sqrt(df))
+  const step = Math.min(0.1, 0.45 / Math.sqrt(df))
   let total = 0
   let weights = 0
   for (const direction of [1, -1]) {
     for (let i = direction === 1 ? 0 : 1; i < 20_000; i++) {
       const u = direction * i * step
       const weight = Math.exp(df * (u - Math.expm1(2 * u) / 2))
-      if (weight < 1e-17) break
+      if (weight < 1e-15) break
       weights += weight
       total += weight * tail(q * Math.exp(u))
     }

@@ -8,13 +8,13 @@ export interface Inverse {
 }
 
 /**
- * Inverse and log-determinant by Cholesky's factor; null where the matrix is not positive definite to about eleven
- * digits of its own diagonal (an effect that the data cannot tell from others).
+ * Inverse and log-determinant by Cholesky's factor; null where a pivot falls to `smallest` of its own diagonal or less
+ * (an effect that the data cannot tell from others).
  *
  * Cost: size³.
  */
-export function invertPositive(matrix: Float64Array, size: number): Inverse | null {
-  const factor = cholesky(matrix, size)
+export function invertPositive(matrix: Float64Array, size: number, smallest = 1e-11): Inverse | null {
+  const factor = cholesky(matrix, size, smallest)
   if (!factor) return null
   let logDeterminant = 0
   for (let i = 0; i < size; i++) logDeterminant += 2 * Math.log(factor[i * size + i]!)
@@ -32,14 +32,14 @@ export function invertPositive(matrix: Float64Array, size: number): Inverse | nu
 }
 
 /** Lower factor L with A = LL', or null. */
-function cholesky(matrix: Float64Array, size: number): Float64Array | null {
+function cholesky(matrix: Float64Array, size: number, smallest: number): Float64Array | null {
   const factor = new Float64Array(size * size)
   for (let i = 0; i < size; i++) {
     for (let j = 0; j <= i; j++) {
       let total = matrix[i * size + j]!
       for (let k = 0; k < j; k++) total -= factor[i * size + k]! * factor[j * size + k]!
       if (i === j) {
-        if (!(total > 1e-11 * matrix[i * size + i]!)) return null
+        if (!(total > smallest * matrix[i * size + i]!)) return null
         factor[i * size + i] = Math.sqrt(total)
       } else {
         factor[i * size + j] = total / factor[j * size + j]!

@@ -4,6 +4,7 @@ import { hasRepeats } from '../cell-table.ts'
 import type { CellTable, Scores } from '../cell-table.ts'
 import { reduceCells, reduceWithPosition } from './blocks.ts'
 import type { ReducedData } from './blocks.ts'
+import { contrast } from './contrasts.ts'
 import { kenwardRoger } from './kenward-roger.ts'
 import type { KenwardRoger } from './kenward-roger.ts'
 import { searchRatios } from './ratio-search.ts'
@@ -70,7 +71,7 @@ export function fitReduced(
     { panelist, interaction, residual: found.residual },
     hasInteraction ? [0, 1, 2] : [0, 2],
   )
-  if (!corrections) return cannot('not-estimable')
+  if (!corrections || hasNoErrorLeft(corrections, data.units)) return cannot('not-estimable')
   const square = data.scale * data.scale
   return {
     data,
@@ -84,6 +85,18 @@ export function fitReduced(
     kenwardRoger: corrections,
   }
 }
+
+/** Differences on next to no degrees of freedom: the listeners' ties leave nothing to measure an error by. */
+const hasNoErrorLeft = (corrections: KenwardRoger, units: number): boolean =>
+  Array.from({ length: units - 1 }, (_, i) => {
+    const between = [
+      [0, 1],
+      [i + 1, -1],
+    ] as const
+    return contrast(corrections, between).df
+  }).some((df) => !(df >= FEWEST_DF))
+
+const FEWEST_DF = 0.1
 
 /** Each unit's mean of cell means, and the spread about them: taken off first, so that no digits are lost. */
 function centring(table: CellTable): { centre: Float64Array; scale: number } {

@@ -70,6 +70,9 @@ export function kenwardRoger(
   }
 }
 
+/** Share of a variance's information that the others leave it, below which the data cannot tell it from them. */
+const CONFOUNDED = 1e-6
+
 type Second = (i: number, j: number) => { xx: Float64Array; trace: number }
 
 /** X'V⁻¹G_iV⁻¹G_jV⁻¹X and tr(V⁻¹G_iV⁻¹G_j) for every pair of components, found once each. */
@@ -166,7 +169,7 @@ function invertSmall(matrix: readonly (readonly number[])[]): number[][] | null 
   const scaled = Float64Array.from(
     matrix.flatMap((row, i) => row.map((value, j) => value / (root[i]! * root[j]!))),
   )
-  const inverse = invertPositive(scaled, size)?.inverse
+  const inverse = invertPositive(scaled, size, CONFOUNDED)?.inverse
   if (!inverse) return null
   return matrix.map((row, i) => row.map((_, j) => inverse[i * size + j]! / (root[i]! * root[j]!)))
 }
