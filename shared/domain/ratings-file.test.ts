@@ -129,6 +129,10 @@ describe('every fault is named with its line', () => {
     expect(problemsOf(three, 2)).toEqual([[4, null, 'too-many-rows']])
     expect(problemsOf(three, 3)).toEqual([])
   })
+  it('stops at more units than one analysis compares', () => {
+    const many = file(...Array.from({ length: 502 }, (_, i) => `1,U${i},Bass,1,,5`))
+    expect(problemsOf(many)).toEqual([[502, 'unit', 'too-many-units']])
+  })
   it('keeps a comma between digits from being guessed at where the comma separates', () => {
     expect(problemsOf(file('1,A,Bass,1,1,"7,5"'))).toEqual([[2, 'score', 'not-a-number']])
   })

@@ -1,3 +1,4 @@
+import { MOST_UNITS } from '#shared/stats/descriptor-data.ts'
 import type { LongRating } from '#shared/stats/analysis-types.ts'
 import { asText, csvLine, readCsv } from './csv.ts'
 import type { CsvRecord } from './csv.ts'
@@ -55,11 +56,17 @@ export function parseRatingsFile(text: string, mostRows: number = limits.importR
   const problems: FileProblem[] = []
   const rows: FileRating[] = []
   const seen = new Map<string, number>()
+  const units = new Set<string>()
   const readRow = rowReader(header)
   for (const record of records.slice(0, mostRows)) {
     const read = readRow(record)
     problems.push(...read.problems)
     if (!read.row) continue
+    units.add(read.row.unit)
+    if (units.size > MOST_UNITS) {
+      problems.push(tooManyUnits(record))
+      break
+    }
     const first = seenBefore(seen, read.row)
     if (first !== null) problems.push(twice(record, first))
     else rows.push(read.row)
@@ -89,6 +96,14 @@ const twice = (record: CsvRecord, first: number): FileProblem =>
     null,
     'duplicate',
     `Line ${first} already holds this listener’s rating of this unit, descriptor and replicate.`,
+  )
+
+const tooManyUnits = (record: CsvRecord): FileProblem =>
+  problem(
+    record.line,
+    'unit',
+    'too-many-units',
+    `This is the ${MOST_UNITS + 1}st unit; one analysis compares at most ${MOST_UNITS}. The rest was not read.`,
   )
 
 function nothing(...problems: FileProblem[]): RatingsFile {

@@ -5,6 +5,7 @@ export const problemReasons = [
   'column-twice',
   'no-rows',
   'too-many-rows',
+  'too-many-units',
   'unclosed-quote',
   'too-few-fields',
   'too-many-fields',

@@ -35,11 +35,19 @@ export function byDescriptor(rows: readonly LongRating[]): Map<string, LongRatin
   return new Map([...groups].sort(([a], [b]) => byName(a, b)))
 }
 
-/** Columns of one descriptor, in an order that does not depend on the order of the rows. */
+/** Units that one analysis compares at most: pairs grow with their square. */
+export const MOST_UNITS = 500
+
+/**
+ * Columns of one descriptor, in an order that does not depend on the order of the rows.
+ *
+ * @throws RangeError for more than `MOST_UNITS` units
+ */
 export function descriptorData(rows: readonly LongRating[]): DescriptorData {
   const rated = rows.filter((row) => row.score !== null)
   const scoredPanelists = sortedNames(rated.map((row) => row.panelist))
   const scoredUnits = sortedNames(rated.map((row) => row.unit))
+  if (scoredUnits.length > MOST_UNITS) throw new RangeError(`${scoredUnits.length} units`)
   const positions = [...new Set(rated.map((row) => row.position ?? -Infinity))].sort((a, b) => a - b)
   const listenerOf = new Map(scoredPanelists.map((name, i) => [name, i]))
   const unitOf = new Map(scoredUnits.map((name, i) => [name, i]))
