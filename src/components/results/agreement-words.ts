@@ -31,7 +31,7 @@ export const steadyShort = (sentence: string): string =>
 
 /** How much weight a descriptor's sentence may carry. */
 export const statedWords: Record<DescriptorResult['stated'], string> = {
-  primary: 'The primary descriptor: named before any rating was seen.',
+  primary: 'The primary descriptor: its result is stated.',
   stated: 'Holds over the whole scorecard (Holm).',
   hint: 'A hint: it does not hold over the whole scorecard (Holm).',
 }

@@ -44,6 +44,7 @@ describe('figures on screen', () => {
 
   it('writes whole degrees of freedom whole', () => {
     expect(asDf(10)).toBe('10')
+    expect(asDf(9.9999999998)).toBe('10')
     expect(asDf(8.523)).toBe('8.52')
   })
 })

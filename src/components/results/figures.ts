@@ -40,4 +40,5 @@ export function asComponent(value: number): string {
 export const asP = (p: number): string => (p < 0.001 ? 'below 0.001' : p.toFixed(3))
 
 /** Degrees of freedom: whole where they are whole, else two decimals. */
-export const asDf = (df: number): string => (Number.isInteger(df) ? String(df) : df.toFixed(2))
+export const asDf = (df: number): string =>
+  Math.abs(df - Math.round(df)) < 1e-6 ? String(Math.round(df)) : df.toFixed(2)

@@ -1,31 +1,32 @@
 import { describe, expect, it } from 'vitest'
 import { suggestedDisclosure } from './disclosure-wording.ts'
 
-const dunlin = { name: 'Dunlin', lender: '', returnOn: null }
+const nothing = { lender: '', returnOn: null }
 
 describe('the wording that Scrim suggests for a disclosure', () => {
   it('names the lender and the day of return of a loan', () => {
-    expect(
-      suggestedDisclosure({ ...dunlin, provenance: 'loan', lender: 'a shop', returnOn: '2026-11-30' }),
-    ).toBe('Dunlin is on loan from a shop until 30 November 2026; the lender saw nothing before this page.')
+    expect(suggestedDisclosure({ provenance: 'loan', lender: 'a shop', returnOn: '2026-11-30' })).toBe(
+      'On loan from a shop until 30 November 2026; the lender saw nothing before this page.',
+    )
   })
 
   it('waits until the lender is known', () => {
-    expect(suggestedDisclosure({ ...dunlin, provenance: 'loan' })).toBeNull()
-    expect(suggestedDisclosure({ ...dunlin, provenance: 'gift' })).toBeNull()
-    expect(suggestedDisclosure({ ...dunlin, provenance: null })).toBeNull()
+    expect(suggestedDisclosure({ ...nothing, provenance: 'loan' })).toBeNull()
+    expect(suggestedDisclosure({ ...nothing, provenance: 'gift' })).toBeNull()
+    expect(suggestedDisclosure({ ...nothing, provenance: 'discounted' })).toBeNull()
+    expect(suggestedDisclosure({ ...nothing, provenance: null })).toBeNull()
   })
 
   it('says who bought a unit where that is known', () => {
-    expect(suggestedDisclosure({ ...dunlin, provenance: 'bought' })).toBe(
-      'Dunlin was bought by the panel at the usual price.',
+    expect(suggestedDisclosure({ ...nothing, provenance: 'bought' })).toBe(
+      'Bought by the panel at the usual price.',
     )
-    expect(suggestedDisclosure({ ...dunlin, provenance: 'bought', lender: 'one of the listeners' })).toBe(
-      'Dunlin was bought by one of the listeners at the usual price.',
+    expect(suggestedDisclosure({ ...nothing, provenance: 'bought', lender: 'one of the listeners' })).toBe(
+      'Bought by one of the listeners at the usual price.',
     )
   })
 
   it('says that a prototype may differ from what is sold', () => {
-    expect(suggestedDisclosure({ ...dunlin, provenance: 'prototype' })).toContain('may differ')
+    expect(suggestedDisclosure({ ...nothing, provenance: 'prototype' })).toContain('may differ')
   })
 })

@@ -12,39 +12,34 @@ export const provenanceWords: Record<Provenance, { choice: string; word: string;
 }
 
 interface Facts {
-  name: string
   provenance: Provenance | null
   lender: string
   returnOn: string | null
 }
 
 /**
- * A wording for the sentence that readers will see. The organiser changes it until it is true; null while the facts it
+ * A wording for the sentence that readers will see after the unit's name. The organiser changes it until it is true; null while the facts it
  * needs are missing.
  */
-export function suggestedDisclosure({ name, provenance, lender, returnOn }: Facts): string | null {
+export function suggestedDisclosure({ provenance, lender, returnOn }: Facts): string | null {
   const from = lender.trim()
   switch (provenance) {
     case null:
       return null
     case 'bought':
-      return from === ''
-        ? `${name} was bought by the panel at the usual price.`
-        : `${name} was bought by ${from} at the usual price.`
+      return from === '' ? 'Bought by the panel at the usual price.' : `Bought by ${from} at the usual price.`
     case 'loan': {
       if (from === '') return null
       const until = returnOn === null ? '' : ` until ${day(returnOn, 'UTC')}`
-      return `${name} is on loan from ${from}${until}; the lender saw nothing before this page.`
+      return `On loan from ${from}${until}; the lender saw nothing before this page.`
     }
     case 'gift':
-      return from === ''
-        ? null
-        : `${name} was given by ${from}, who asked for nothing and saw nothing before this page.`
+      return from === '' ? null : `Given by ${from}, who asked for nothing and saw nothing before this page.`
     case 'discounted':
-      return from === '' ? null : `${name} was bought from ${from} below the usual price.`
+      return from === '' ? null : `Bought from ${from} below the usual price.`
     case 'prototype':
       return from === ''
-        ? `${name} is a prototype; what is sold may differ.`
-        : `${name} is a prototype from ${from}; what is sold may differ.`
+        ? 'A prototype; what is sold may differ.'
+        : `A prototype from ${from}; what is sold may differ.`
   }
 }

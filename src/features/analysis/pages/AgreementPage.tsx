@@ -56,13 +56,15 @@ function Spreads({ panel, agreement, round }: SpreadsProps) {
       {results.map((result) => (
         <DescriptorSpread key={result.descriptor.key} result={result} listenerName={called} />
       ))}
-      <FolioSection
-        label="Left out"
-        note="Excluding listeners raises published agreement. Rules were frozen at opening; none rests on disagreeing with the panel."
-      >
-        <h2 className="heading mb-3">Left out by a rule</h2>
-        <Exclusions agreement={agreement} called={called} />
-      </FolioSection>
+      {(agreement.round.origin === 'live' || agreement.exclusions.length > 0) && (
+        <FolioSection
+          label="Left out"
+          note="Excluding listeners raises published agreement. Rules were frozen at opening; none rests on disagreeing with the panel."
+        >
+          <h2 className="heading mb-3">Left out by a rule</h2>
+          <Exclusions agreement={agreement} called={called} />
+        </FolioSection>
+      )}
       {agreement.round.origin === 'live' && (
         <FolioSection label="Recognised">
           <h2 className="heading mb-3">Recognised under its code</h2>

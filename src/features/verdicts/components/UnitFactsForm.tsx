@@ -49,7 +49,6 @@ export function UnitFactsForm({ at, unit, nth, currency, today, onUnsaved }: Uni
     'priceUnknown',
   ])
   const suggestion = suggestedDisclosure({
-    name: unit.name,
     provenance: (provenance as Provenance | undefined) ?? null,
     lender: lender ?? '',
     returnOn: returnOn || null,

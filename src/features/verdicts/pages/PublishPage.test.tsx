@@ -76,7 +76,7 @@ describe('the desk before publishing', () => {
     expect(server.asked('saveUnitFacts')[0]?.body).toMatchObject({
       provenance: 'loan',
       lender: 'a shop',
-      disclosure: 'Knot is on loan from a shop; the lender saw nothing before this page.',
+      disclosure: 'On loan from a shop; the lender saw nothing before this page.',
       price: { minor: 5450, currency: 'EUR' },
       priceUnknown: false,
     })
