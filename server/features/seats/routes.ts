@@ -1,4 +1,5 @@
 import * as contract from '#shared/contracts/seats.ts'
+import { notFound } from '#server/http/api-error.ts'
 import { mountEvents } from '#server/http/event-stream.ts'
 import type { Feature } from '#server/http/feature.ts'
 import { openLink } from './join-service.ts'
@@ -23,6 +24,7 @@ export const seats: Feature = (mount, router, deps) => {
   mount(contract.answerEnd, ({ params, body }, context) => service.answerEnd(context, params.seat, body))
   mount(contract.getSeatReport, ({ params }, context) => ownReport(context, params.seat))
   mount(contract.forgetSeat, async ({ params }, context) => {
+    if (!context.actor.seatIds.includes(params.seat)) throw notFound()
     context.session.forgetSeat(params.seat)
     return { done: true as const }
   })
