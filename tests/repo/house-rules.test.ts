@@ -74,7 +74,7 @@ describe('pages', () => {
     const missing = pages.flatMap((page) =>
       [...text(page).matchAll(paths)]
         .map((match) => match[1] ?? '')
-        .filter((path) => !existsSync(path))
+        .filter((path) => !path.includes('NNNN') && !existsSync(path))
         .map((path) => `${page}: ${path}`),
     )
     expect(missing).toEqual([])
