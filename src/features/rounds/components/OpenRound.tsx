@@ -18,7 +18,7 @@ export function OpenRound({ panel, round }: OpenRoundProps) {
   const [asking, setAsking] = useState(false)
   const open = useOpenRound(at, round.version)
   const navigate = useNavigate()
-  const blinded = round.people.some((person) => person.roles.includes('organiser') && person.roles.length > 1)
+  const blinded = round.you.roles.some((role) => role === 'steward' || role === 'panelist')
   return (
     <>
       <Button

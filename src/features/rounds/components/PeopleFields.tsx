@@ -28,7 +28,12 @@ export function PeopleFields({ form, errorAt, known }: PeopleFieldsProps) {
       { shouldDirty: true },
     )
   return (
-    <fieldset id="people" tabIndex={-1} aria-describedby={error ? 'people-error' : undefined}>
+    <fieldset
+      id="people"
+      className="min-w-0"
+      tabIndex={-1}
+      aria-describedby={error ? 'people-error' : undefined}
+    >
       <legend className="field-label">Who is present</legend>
       <p className="field-hint">
         Two listeners or more. Whoever only helps does not listen: take the tick away.
@@ -39,7 +44,7 @@ export function PeopleFields({ form, errorAt, known }: PeopleFieldsProps) {
           const called = people[nth]?.name.trim() || `Person ${nth + 1}`
           return (
             <li key={field.key} className="flex flex-wrap items-start gap-x-3 py-3">
-              <div className="min-w-[10rem] flex-1">
+              <div className="min-w-[min(10rem,100%)] flex-1">
                 <TextField
                   label={
                     <span className="note">

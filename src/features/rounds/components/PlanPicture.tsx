@@ -15,6 +15,7 @@ export function PlanPicture({ round }: { round: Round }) {
   ]
   return (
     <PlanRows
+      heading="h2"
       title="Who hears something when"
       sentence={sentence.join(' ')}
       turns={turns}

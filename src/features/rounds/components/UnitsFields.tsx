@@ -18,13 +18,18 @@ export function UnitsFields({ form, errorAt, known }: UnitsFieldsProps) {
   const error = errorAt('units')
   const makers = [...new Set(known.map((unit) => unit.maker))]
   return (
-    <fieldset id="units" tabIndex={-1} aria-describedby={error ? 'units-error' : undefined}>
+    <fieldset
+      id="units"
+      className="min-w-0"
+      tabIndex={-1}
+      aria-describedby={error ? 'units-error' : undefined}
+    >
       <legend className="field-label">Which earphones</legend>
       <p className="field-hint">Three to six, by maker and name.</p>
       <ol className="rows mt-2">
         {fields.map((field, nth) => (
           <li key={field.key} className="flex items-start gap-2 py-3">
-            <div className="grid flex-1 grid-cols-[repeat(auto-fit,minmax(8rem,1fr))] gap-3">
+            <div className="grid flex-1 grid-cols-[repeat(auto-fit,minmax(min(8rem,100%),1fr))] gap-3">
               <TextField
                 label={<span className="note">Maker of unit {nth + 1}</span>}
                 list="known-makers"

@@ -43,7 +43,7 @@ describe('the plan', () => {
   })
 
   it('opens only after it was said what freezes', async () => {
-    const server = await showPlan(draftRound)
+    const server = await showPlan({ ...draftRound, you: { roles: ['organiser', 'panelist'], seatId: null } })
     server.on(openRound, () => openRoundRecord)
     press('Open the round')
     expect(inDialog().getByText('units, people and their duties')).toBeVisible()
