@@ -11,7 +11,7 @@ import { getSeatReport } from '#shared/contracts/seats.ts'
 import * as contract from '#shared/contracts/verdicts.ts'
 import { CallError } from '#src/lib/call.ts'
 import { startApp, type TestApp } from '#tests/support/app.ts'
-import { anEvening, openEvening, playAll, signUpOrganiser, type OpenEvening } from '#tests/support/evening.ts'
+import { anEvening, openEvening, playAll, type OpenEvening } from '#tests/support/evening.ts'
 import { visit } from '#tests/support/visitor.ts'
 
 let app: TestApp
