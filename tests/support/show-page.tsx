@@ -7,9 +7,9 @@ import type { Endpoint, ResponseOf } from '#shared/contracts/endpoint.ts'
 import { statusOf, type ErrorCode } from '#shared/contracts/errors.ts'
 import { createQueryClient } from '#src/lib/query-client.ts'
 
-// The machine may be busy: a page gets five seconds to come, a test half a minute.
+// The machine may be busy: a page gets five seconds to come, a test a minute.
 configure({ asyncUtilTimeout: 5_000 })
-vi.setConfig({ testTimeout: 30_000 })
+vi.setConfig({ testTimeout: 60_000 })
 
 export interface Asked {
   params: Record<string, string>

@@ -11,5 +11,5 @@ export interface AtTable {
 /** The steward's table: codes and states. */
 export const tableQuery = (params: AtTable) => ask(getTable, { params })
 
-/** The round as the steward sees it; only for the steward's own seat. */
+/** The round as the steward sees it; for the steward's own seat and the way to the links. */
 export const roundQuery = ({ panel, round }: AtTable) => ask(getRound, { params: { panel, round } })

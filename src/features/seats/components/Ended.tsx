@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import type { PanelistSeat } from '#shared/contracts/seats.ts'
 import { to } from '#src/app/paths.ts'
 import { LinkButton } from '#src/components/ui/LinkButton.tsx'
+import { ForgetButton } from './ForgetButton.tsx'
 import { HandOverLinks } from './HandOver.tsx'
 import { ScreenTitle } from './ScreenTitle.tsx'
 import { SeatFrame } from './SeatFrame.tsx'
@@ -43,6 +44,9 @@ export function Ended({ seat, how, notices, kept }: EndedProps) {
         <LinkButton to={to('publicRound', { round: seat.round.id })}>The round’s public page</LinkButton>
       </div>
       <HandOverLinks seat={seat} />
+      <div className="mt-6">
+        <ForgetButton seat={seat} />
+      </div>
     </SeatFrame>
   )
 }

@@ -14,7 +14,9 @@ export function ratingWords({ yours, cantTell, panelMedian, n }: Rating): string
   const panel =
     panelMedian === null
       ? 'the panel: too few ratings to show'
-      : `the panel ${figure(panelMedian)}, ${n} ${n === 1 ? 'rating' : 'ratings'}`
+      : n === 1 && yours !== null
+        ? 'nobody else rated it'
+        : `the panel ${figure(panelMedian)}, ${n} ${n === 1 ? 'rating' : 'ratings'}`
   return `${own} · ${panel}`
 }
 

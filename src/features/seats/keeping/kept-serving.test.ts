@@ -35,6 +35,7 @@ describe('what is kept of one serving', () => {
   test('two phones or tabs use one key for one serving, and a serving under another code is another one', () => {
     expect(submitted(start).outbox?.key).toBe(submitted(keptStart(place)).outbox?.key)
     expect(submitted(keptStart({ ...place, code: '528' })).outbox?.key).not.toBe(submitted(start).outbox?.key)
+    expect(submitted(start).outbox?.key).toMatch(/^[\w-]+$/)
     expect(keptId(place)).not.toBe(keptId({ ...place, code: '528' }))
   })
 

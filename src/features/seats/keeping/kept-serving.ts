@@ -6,7 +6,7 @@ import type { Answer } from '#src/components/rating/answer.ts'
 export type KeptAnswer = Exclude<Answer, null>
 
 export interface Outbox {
-  /** The idempotency key: one for each serving and code, the same in every tab and at every attempt. */
+  /** The idempotency key: one for each serving and code, the same in every tab and at every attempt. Letters, digits, hyphens. */
   key: string
   /** queued: to be sent. refused: the server would not take it. late, void: taken, with a word that is not yet read. */
   state: 'queued' | 'refused' | 'late' | 'void'
@@ -73,7 +73,7 @@ export function changed(before: KeptServing, change: Change): KeptServing {
 export const submitted = (before: KeptServing): KeptServing =>
   before.outbox
     ? before
-    : { ...before, outbox: { key: `${before.serving}.${before.code}`, state: 'queued', words: '' } }
+    : { ...before, outbox: { key: `${before.serving}-${before.code}`, state: 'queued', words: '' } }
 
 /** Puts a refused submission back into the queue, under the same key. */
 export const requeued = (before: KeptServing | undefined): KeptServing | undefined =>

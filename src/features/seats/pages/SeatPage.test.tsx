@@ -6,6 +6,7 @@ import {
   answerEnd,
   checkSeal,
   confirmCode,
+  forgetSeat,
   getSeat,
   getSeatReport,
   giveConsent,
@@ -18,7 +19,7 @@ import { otherSeatId, scorecardOf, seatFixture, seatId, servingFixture } from '.
 import SeatPage from './SeatPage.tsx'
 
 const show = (state: unknown = null) =>
-  showPage(SeatPage, paths.seat.pattern, { pathname: to('seat', { seat: seatId }), state })
+  showPage(SeatPage, paths.seat.pattern, { pathname: to('seat', { seat: seatId }), state }, { '/': 'home' })
 
 const card = scorecardOf(['warmth', 'width'])
 
@@ -57,7 +58,7 @@ async function answerAll() {
   await press('Next: staging')
   await press(/Width: a step towards well outside/)
   await press('Next: a remark')
-  await userEvent.type(screen.getByRole('textbox', { name: /Remark/ }), 'thin voice')
+  await userEvent.type(screen.getByRole('textbox', { name: /Remark/ }), 'thin')
   await press('Next: a last look')
 }
 
@@ -125,7 +126,7 @@ describe('rating one serving', () => {
           { descriptor: 'warmth', value: null, cantTell: true },
           { descriptor: 'width', value: 50, cantTell: false },
         ],
-        remark: 'thin voice',
+        remark: 'thin',
       },
     ])
   })
@@ -212,7 +213,27 @@ describe('rating one serving', () => {
   })
 })
 
+describe('a serving that was set aside or missed', () => {
+  test('says so while the next one is awaited', async () => {
+    const { set } = seatServer({ step: 'waiting', serving: servingFixture({ state: 'void' }) })
+    const { client } = show()
+    await screen.findByText('The steward set your last serving aside')
+    set({ serving: servingFixture({ state: 'missed' }) })
+    await client.invalidateQueries()
+    await screen.findByText(/It counts as missed/)
+  })
+})
+
 describe('two people, one phone', () => {
+  test('a seat that is through can be closed on a borrowed phone', async () => {
+    const { server } = seatServer({ step: 'thanks' })
+    server.on(forgetSeat, () => ({ done: true as const }))
+    const { router } = show()
+    await userEvent.click(await screen.findByRole('button', { name: 'Close this seat on this phone' }))
+    await waitFor(() => expect(router.state.location.pathname).toBe('/'))
+    expect(server.asked('forgetSeat')).toHaveLength(1)
+  })
+
   test('the other seat opens behind a plain screen that shows nothing of the one before', async () => {
     seatServer({ otherSeats: [{ id: otherSeatId, label: 'Seat 4' }] })
     const { router } = show()

@@ -1,6 +1,6 @@
 import { useQuery } from '@tanstack/react-query'
-import { useEffect, useState } from 'react'
-import { useLocation, useParams } from 'react-router-dom'
+import { useEffect } from 'react'
+import { useLocation, useNavigate, useParams } from 'react-router-dom'
 import { seatEvents } from '#shared/contracts/seats.ts'
 import { SeatLayout } from '#src/components/layout/SeatLayout.tsx'
 import { Notice } from '#src/components/ui/Notice.tsx'
@@ -21,7 +21,7 @@ const checkAfter = 30_000
 export default function SeatPage() {
   const { seat: id = '' } = useParams()
   const location = useLocation()
-  const [taken, setTaken] = useState<string | null>(null)
+  const navigate = useNavigate()
   const [keeping, state] = useKeeping()
   const { interval } = useLive(addressOf(seatEvents, { params: { seat: id } }), [seatQuery(id).queryKey])
   const query = useQuery({
@@ -59,8 +59,15 @@ export default function SeatPage() {
     )
   }
   const handed = (location.state as { handed?: boolean } | null)?.handed === true
-  if (handed && taken !== id)
-    return <HandOverScreen key={id} label={seat.label} onTaken={() => setTaken(id)} />
+  if (handed)
+    return (
+      <HandOverScreen
+        key={id}
+        label={seat.label}
+        // Forgotten once taken, so that a reload does not ask again.
+        onTaken={() => void navigate(location.pathname, { replace: true, state: null })}
+      />
+    )
   const refused = query.error instanceof CallError && query.error.problem.status < 500
   if (refused)
     return (

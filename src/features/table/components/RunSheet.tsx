@@ -30,8 +30,8 @@ export function RunSheet({ at, table, connected }: RunSheetProps) {
   const [said, setSaid] = useState('')
   const resting = seats.some(({ serving }) => typeof serving?.restUntil === 'string')
   const now = useServerClock(table.serverTime, resting)
-  const own = useQuery({ ...roundQuery(at), enabled: table.youListen })
-  const seatId = own.data?.you.seatId
+  const own = useQuery({ ...roundQuery(at), staleTime: 60_000 })
+  const seatId = table.youListen ? own.data?.you.seatId : null
   const close = () => setAsked(null)
   const seat = seats.find(({ id }) => id === asked?.seat)
   const where = sitting.ended
@@ -75,6 +75,9 @@ export function RunSheet({ at, table, connected }: RunSheetProps) {
         <Button kind="secondary" onClick={() => setAsked({ what: 'incident', seat: null })}>
           Something went wrong
         </Button>
+        {own.data?.can.handOutLinks && (
+          <LinkButton to={to('links', { panel: at.panel, round: at.round })}>Seats’ links</LinkButton>
+        )}
         {seatId && <LinkButton to={to('seat', { seat: seatId })}>Your own seat</LinkButton>}
       </div>
       <p className="note pb-2" role="status">

@@ -22,6 +22,7 @@ function tableServer(part: Partial<StewardTable> = {}) {
   const held = { table: tableFixture(part) }
   const server = fakeServer()
     .on(getTable, () => held.table)
+    .on(getRound, () => ({ ...roundOf(), you: { roles: ['steward' as const], seatId: null } }))
     .on(nextTurn, () => {
       const { sitting } = held.table
       return (held.table = { ...held.table, notSent: [], sitting: { ...sitting, turn: sitting.turn + 1 } })
@@ -41,6 +42,16 @@ const press = (name: string | RegExp) => userEvent.click(screen.getByRole('butto
 afterEach(() => vi.unstubAllGlobals())
 
 describe('the run sheet', () => {
+  test('says that it is over once the round has closed, and shows no codes any more', async () => {
+    const { server } = tableServer()
+    const { client } = show()
+    await screen.findByRole('list', { name: 'Seats' })
+    server.on(getTable, () => new Refusal('forbidden', 'The table is over: the round is closed.'))
+    await client.invalidateQueries()
+    await screen.findAllByText('The table is over: the round is closed.')
+    expect(screen.queryByRole('list', { name: 'Seats' })).not.toBeInTheDocument()
+  })
+
   test('has one line a seat with its code and what it is doing, and never a number that was rated', async () => {
     tableServer({
       seats: [

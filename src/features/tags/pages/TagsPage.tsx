@@ -4,7 +4,8 @@ import { roundEvents } from '#shared/contracts/rounds.ts'
 import type { Tags } from '#shared/contracts/tags.ts'
 import { Asked } from '#src/components/asked/Asked.tsx'
 import { PageTitle } from '#src/components/ui/PageTitle.tsx'
-import { addressOf } from '#src/lib/call.ts'
+import { Notice } from '#src/components/ui/Notice.tsx'
+import { addressOf, CallError } from '#src/lib/call.ts'
 import { useLive } from '#src/lib/use-live.ts'
 import { CodeTagsView, LetterTagsView } from '../components/HalfTags.tsx'
 import { KeeperTagsView } from '../components/KeeperTags.tsx'
@@ -17,6 +18,10 @@ const titles: Record<Tags['part'], string> = {
   letters: 'Put the pairs into lettered pouches',
   codes: 'Put the codes over the letters',
 }
+
+/** The round has closed, or the duty has passed to somebody else: what is on the screen is over. */
+const isRefusal = (error: unknown): error is CallError =>
+  error instanceof CallError && error.problem.status < 500
 
 const checkAfter = 30_000
 
@@ -42,6 +47,17 @@ export default function TagsPage() {
     refetchOnWindowFocus: 'always',
     networkMode: 'always',
   })
+  if (query.data && isRefusal(query.error))
+    return (
+      <div className="folio">
+        <PageTitle size="plain">Tag the pouches</PageTitle>
+        <div className="mt-4">
+          <Notice title={query.error.problem.title} live>
+            {query.error.problem.detail}
+          </Notice>
+        </div>
+      </div>
+    )
   return (
     <div className="folio">
       <div className="max-w-matter">
