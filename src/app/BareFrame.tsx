@@ -1,4 +1,5 @@
 import { Outlet, ScrollRestoration } from 'react-router-dom'
+import { SkipLink } from '#src/components/ui/SkipLink.tsx'
 import { Arriving } from './Arriving.tsx'
 import { DemoWords, useIsDemo } from './DemoBar.tsx'
 
@@ -7,6 +8,7 @@ export function BareFrame() {
   const demo = useIsDemo()
   return (
     <>
+      <SkipLink />
       {demo && (
         <div className="demo-bar" role="region" aria-label="Demo">
           <DemoWords />

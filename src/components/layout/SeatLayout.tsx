@@ -1,5 +1,4 @@
 import type { ReactNode } from 'react'
-import { SkipLink } from '../ui/SkipLink.tsx'
 
 interface SeatLayoutProps {
   /** The code under cloth, when the listener has one in hand. */
@@ -13,11 +12,10 @@ interface SeatLayoutProps {
   verb?: ReactNode
 }
 
-/** A listener's screen: code on top, one matter, the verb at the bottom. */
+/** A listener's screen: code on top, one matter (the frame's skip link leads to it), the verb at the bottom. */
 export function SeatLayout({ code, where, children, kept, verb }: SeatLayoutProps) {
   return (
     <div className="seat">
-      <SkipLink />
       {(code || where) && (
         <header className="seat-head">
           {code}
