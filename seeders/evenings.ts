@@ -14,9 +14,9 @@ const tomas: Person = { name: 'Tomas Reyk', listens: false, duty: 'keeper' }
 const wanda = listener('Wanda Osei', { steward: true })
 
 const tracks = [
-  'Harbour bells, second minute: how far apart are they?',
-  'Low Water, the verse: the singer and the cello',
-  'Brass on the Mole, the last chorus: loud and busy',
+  'Harbour bells, second minute, for how far apart they stand',
+  'Low Water, the verse, for the singer and the cello',
+  'Brass on the Mole, the last chorus, loud and busy',
 ]
 const chain = 'One player and one headphone amplifier for everybody, cable switched by the steward'
 const sleeves = 'Black sleeves over the shells, the same dark cable on all'

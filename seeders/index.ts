@@ -1,10 +1,13 @@
 import { inTransaction } from '#server/db/transaction.ts'
 import type { Deps } from '#server/deps.ts'
+import { Job } from '#server/models/job.ts'
+import { Op } from 'sequelize'
 import { afterTheRegatta, sixSmallOnes, threeForTheTrain } from './evenings.ts'
 import { bringOldSheets } from './old-sheets.ts'
 import { demoSlug, seedPanel } from './panel.ts'
 import { cancelled, drafted, onTheTable, published, waitingForItsVerdict } from './rounds.ts'
 import { seededRandom } from './seeded-random.ts'
+import { fromNow } from './world.ts'
 
 /**
  * The demo's invented world, made once: the same ids, codes and ratings at every seeding, dates relative to the day of
@@ -24,6 +27,8 @@ export async function seedDemo(deps: Deps): Promise<void> {
     await cancelled(world)
     await published(world, sixSmallOnes, { played: 16, published: 11 }, words.sixSmallOnes)
     await waitingForItsVerdict(world)
+    // Nobody is written to about evenings that are over.
+    await Job.destroy({ where: { createdAt: { [Op.lt]: fromNow(world, -24 * 60) } } })
     await onTheTable(world)
     await drafted(world)
   })
@@ -43,6 +48,6 @@ const words = {
   sixSmallOnes: {
     headline: 'Dunlin is the widest of six and Whimbrel the warmest. On depth the panel does not agree.',
     summary:
-      'Fourteen listeners heard six earphones under 250, blind and matched in level. Width and warmth are heard the same way by nearly everyone. Overall liking is not: some of us like wide and bright, others warm and full, and an average would hide that. One listener’s ratings follow no unit at all; they are in the numbers, since no rule that was frozen before the evening leaves them out.',
+      'Fourteen listeners heard six earphones under 250, blind and matched in level. Width and warmth are heard the same way by nearly everyone. Overall liking is not: some of us like wide and bright, others warm and full, and an average would hide that. One listener’s ratings wander far from everybody’s; they are in the numbers, since no rule that was frozen before the evening leaves them out.',
   },
 }

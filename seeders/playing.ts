@@ -121,9 +121,9 @@ export async function start(evening: Evening, held: Held, at: Date): Promise<voi
   await noteSeal(phone(evening, held, later(at, 1)), held.seat.id, held.serving, 'yes')
 }
 
-/** One serving from the digits to "sent"; the seal is looked at, but not told to the phone. */
+/** One serving from the digits to "sent". */
 export async function rate(evening: Evening, held: Held, at: Date): Promise<void> {
-  await type(evening, held, held.code, at)
+  await start(evening, held, at)
   const { name } = held.seat
   const unit = evening.unitOf(held.code)
   await submit(

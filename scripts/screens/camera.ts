@@ -30,6 +30,10 @@ export interface Camera {
   close(): Promise<void>
 }
 
+/** The whole page's, so that what sticks to the window's foot stands at the page's foot. */
+const heightOf = (page: Page): Promise<number> =>
+  page.evaluate('Math.max(document.documentElement.scrollHeight, document.querySelector(".stage")?.scrollHeight ?? 0)')
+
 /** @param url the application's address  @param folder where pictures go */
 export async function setUpCamera(url: string, folder: string, executablePath: string): Promise<Camera> {
   mkdirSync(folder, { recursive: true })
@@ -51,10 +55,14 @@ export async function setUpCamera(url: string, folder: string, executablePath: s
     take: async (page, name) => {
       for (const size of sizes) {
         await page.setViewportSize(size)
+        await page.mouse.move(0, 0)
         for (const [colorScheme, word] of schemes) {
           await page.emulateMedia({ colorScheme })
-          await page.waitForTimeout(250) // pictures are drawn anew at the new width
-          await page.screenshot({ path: join(folder, `${name}-${size.width}-${word}.png`), fullPage: true })
+          await page.waitForTimeout(300) // pictures are drawn anew at the new width
+          await page.setViewportSize({ ...size, height: Math.max(size.height, await heightOf(page)) })
+          await page.waitForTimeout(150)
+          await page.screenshot({ path: join(folder, `${name}-${size.width}-${word}.png`) })
+          await page.setViewportSize(size)
         }
       }
       await page.setViewportSize(sizes[0])

@@ -19,5 +19,10 @@ export const reader = (cast: Cast): Visitor => cast.reader
 export const organiser = (cast: Cast): Visitor => cast.organiser
 
 export const headed = (page: Page): Promise<void> => page.getByRole('heading', { level: 1 }).first().waitFor()
+/** Nothing is awaited any more. */
+export async function settled(page: Page): Promise<void> {
+  await page.waitForTimeout(300)
+  await page.locator('[aria-busy="true"]').first().waitFor({ state: 'detached' })
+}
 export const press = (page: Page, name: string | RegExp): Promise<void> =>
   page.getByRole('button', { name }).first().click()

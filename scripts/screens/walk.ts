@@ -6,7 +6,7 @@ import { castOf } from './cast.ts'
 import { panelShots } from './panel-shots.ts'
 import { publicShots } from './public-shots.ts'
 import { seatShots } from './seat-shots.ts'
-import { headed, type Shot } from './shot.ts'
+import { headed, settled, type Shot } from './shot.ts'
 
 /** The seats come last: their pictures bring the evening to its end. */
 const all: readonly Shot[] = [...publicShots, ...panelShots, ...seatShots]
@@ -34,8 +34,9 @@ try {
     try {
       await page.goto(where)
       await headed(page)
-      await page.waitForLoadState('networkidle', { timeout: 3000 }).catch(() => undefined)
+      await settled(page)
       await shot.then?.(page, cast)
+      await settled(page)
       await camera.take(page, shot.name)
       console.log(`  ${shot.name}`)
     } catch (error) {

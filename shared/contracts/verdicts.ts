@@ -133,6 +133,8 @@ export const verdictLine = z.strictObject({
   panelName: z.string(),
   publishedAt: instant,
   label: z.string(),
+  /** Single-blind, imported, not level-matched and the like: what must stand wherever the result appears. */
+  labels: z.array(z.string()),
   listeners: z.number().int(),
   descriptor: descriptor.nullable(),
   units: z.array(

@@ -37,7 +37,11 @@ function placesOf(round: Round, panel: string): Place[] {
     [to('seat', { seat: round.you.seatId ?? '' }), 'Your seat', running && round.you.seatId !== null],
     [to('agreement', at), 'Agreement', round.can.seeAgreement],
     [to('reveal', at), 'Reveal', round.can.seeAgreement && round.origin === 'live'],
-    [to('publish', at), 'Write the verdict', round.can.publish],
+    [
+      to('publish', at),
+      round.status === 'published' ? 'Correct the verdict' : 'Write the verdict',
+      round.can.publish,
+    ],
     [
       to('publicRound', { round: round.id }),
       'Public page',

@@ -90,6 +90,7 @@ export function presentLine(content: PublicVerdict): VerdictLine {
     panelName: content.panelName,
     publishedAt: content.publishedAt,
     label: content.label.words,
+    labels: content.labels,
     listeners: content.method.listeners,
     descriptor: leading?.descriptor ?? null,
     units: (leading?.units ?? []).flatMap((unit) =>

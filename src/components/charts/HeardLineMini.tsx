@@ -1,7 +1,7 @@
 import { scaleLinear } from 'd3-scale'
 import { useWidth } from '#src/hooks/useWidth.ts'
 import type { Family } from '../families.ts'
-import { labelWhatFits } from './geometry/labels.ts'
+import { labelWhatFits, staggerLabels, type PlacedLabel } from './geometry/labels.ts'
 import { textWidth } from './geometry/text-width.ts'
 import { printed } from './number-words.ts'
 
@@ -12,9 +12,21 @@ interface HeardLineMiniProps {
   points: { name: string; value: number }[]
 }
 
+const lineHeight = 16
+const mostLines = 3
+
+/** All names on up to three lines over their knots; only where even those do not do, as many as stand apart. */
+function placeNames(points: { name: string; value: number }[], xs: number[], x0: number, x1: number) {
+  const names = points.map((point) => point.name)
+  const { labels, lines } = staggerLabels(names, xs, x0, x1, 13)
+  return lines > 0 && lines <= mostLines
+    ? { labels, lines }
+    : { labels: labelWhatFits(names, xs, x0, x1, 13), lines: 1 }
+}
+
 /**
- * A heard line 24 px high, for a list of verdicts: the units as knots on one thread with its end words beside it where
- * there is room, and as many names as stand apart.
+ * A heard line for a list of verdicts, 24 px high where its names stand side by side: the units as knots on one thread,
+ * its end words beside it or, where there is no room, below.
  */
 export function HeardLineMini({ family, scale, points }: HeardLineMiniProps) {
   const [ref, width] = useWidth<HTMLDivElement>(480)
@@ -23,14 +35,22 @@ export function HeardLineMini({ family, scale, points }: HeardLineMiniProps) {
   const beside = low + high < width * 0.42
   const left = beside ? low + 12 : 5
   const right = beside ? width - high - 12 : width - 5
+  const ordered = [...points].sort((a, b) => a.value - b.value)
+  const covers = ({ nth, x: from }: PlacedLabel, at: number): boolean =>
+    at > from - 2 && at < from + textWidth(ordered[nth]?.name ?? '', 13) + 2
   const x = scaleLinear([scale.low, scale.high], [left, right]).clamp(true)
-  const labels = labelWhatFits(
-    points.map((point) => point.name),
-    points.map((point) => x(point.value)),
+  const { labels, lines } = placeNames(
+    ordered,
+    ordered.map((point) => x(point.value)),
     beside ? left : 0,
     beside ? right : width,
-    13,
   )
+  // A name on an upper line is tied to its knot, unless the tie would cross another name.
+  const leaders = labels
+    .map((label) => ({ ...label, at: x(ordered[label.nth]?.value ?? 0) }))
+    .filter(({ line, at }) => line > 0 && !labels.some((other) => other.line < line && covers(other, at)))
+  const y = 2 + lines * lineHeight
+  const wordsAt = beside ? y + 4 : y + 20
   const said = [...points]
     .sort((a, b) => b.value - a.value)
     .map((point) => `${point.name} ${printed(point.value)}`)
@@ -40,28 +60,27 @@ export function HeardLineMini({ family, scale, points }: HeardLineMiniProps) {
       <svg
         className="chart-svg"
         width={width}
-        height={24}
+        height={beside ? y + 6 : y + 24}
         role="img"
         aria-label={`From ${scale.lowWord} to ${scale.highWord}: ${said}`}
         style={{ fontSize: 13 }}
       >
-        {beside && (
-          <>
-            <text className="chart-word" x={0} y={22}>
-              {scale.lowWord}
-            </text>
-            <text className="chart-word" x={width} y={22} textAnchor="end">
-              {scale.highWord}
-            </text>
-          </>
-        )}
-        <line className="chart-line" x1={left} x2={right} y1={18} y2={18} />
-        {points.map((point) => (
-          <circle key={point.name} className="chart-family-fill" cx={x(point.value)} cy={18} r={4} />
+        <text className="chart-word" x={0} y={wordsAt}>
+          {scale.lowWord}
+        </text>
+        <text className="chart-word" x={width} y={wordsAt} textAnchor="end">
+          {scale.highWord}
+        </text>
+        <line className="chart-line" x1={left} x2={right} y1={y} y2={y} />
+        {leaders.map(({ nth, at, line }) => (
+          <line key={nth} className="chart-line" x1={at} x2={at} y1={y - line * lineHeight - 5} y2={y} />
+        ))}
+        {ordered.map((point) => (
+          <circle key={point.name} className="chart-family-fill" cx={x(point.value)} cy={y} r={4} />
         ))}
         {labels.map((label) => (
-          <text key={label.nth} className="chart-name-small" x={label.x} y={10}>
-            {points[label.nth]?.name}
+          <text key={label.nth} className="chart-name-small" x={label.x} y={y - 8 - label.line * lineHeight}>
+            {ordered[label.nth]?.name}
           </text>
         ))}
       </svg>

@@ -43,7 +43,9 @@ export function heldBack(preview: ImportPreview | null, leaveOut: boolean): stri
   if (preview.descriptors.length === 0) return 'No row has a score.'
   if (preview.units.length < 2) return 'There is one unit only; a comparison needs two.'
   if (preview.faultCount > 0 && !leaveOut)
-    return 'Correct these rows in the file and choose it again, or leave them out.'
+    return preview.faultCount === 1
+      ? 'Correct this row in the file and choose it again, or leave it out.'
+      : 'Correct these rows in the file and choose it again, or leave them out.'
   return null
 }
 

@@ -18,11 +18,11 @@ function UnitLine({ unit, row, values, stage }: { unit: Unit; row: number; value
   const y = yOf(row, stage)
   return (
     <g>
-      <text x={xOf(stage.scale.low, stage)} y={y - 20} className="chart-name">
+      <text x={xOf(stage.scale.low, stage)} y={y - 20} className="chart-name chart-over-threads">
         {unit.name}
       </text>
       {unit.median !== null && (
-        <text x={stage.width - 14} y={y - 20} textAnchor="end" className="chart-name">
+        <text x={stage.width - 14} y={y - 20} textAnchor="end" className="chart-name chart-over-threads">
           {asPoints(unit.median, stage.scale)}
         </text>
       )}
@@ -74,15 +74,6 @@ export function RevealPicture({ reveal, drawn }: RevealPictureProps) {
           {reveal.threads.map((thread, nth) => (
             <path key={nth} d={threadPath(thread.values, drawn, stage)} className="thread-listener" />
           ))}
-          {out.map((unit, row) => (
-            <UnitLine
-              key={row}
-              unit={unit}
-              row={row}
-              stage={stage}
-              values={reveal.threads.flatMap((thread) => thread.values[row] ?? [])}
-            />
-          ))}
           <path
             d={threadPath(
               out.map((unit) => unit.median),
@@ -92,6 +83,15 @@ export function RevealPicture({ reveal, drawn }: RevealPictureProps) {
             className="chart-family-stroke"
             strokeWidth={3.5}
           />
+          {out.map((unit, row) => (
+            <UnitLine
+              key={row}
+              unit={unit}
+              row={row}
+              stage={stage}
+              values={reveal.threads.flatMap((thread) => thread.values[row] ?? [])}
+            />
+          ))}
           {out.map(
             (unit, row) =>
               unit.median !== null && (

@@ -67,7 +67,7 @@ export function RoundHead({ panel, agreement, round }: RoundHeadProps) {
       <div className="actions mt-6">
         {agreement.can.publish && (
           <LinkButton kind="primary" to={to('publish', at)}>
-            Write the verdict
+            {round.status === 'published' ? 'Correct the verdict' : 'Write the verdict'}
           </LinkButton>
         )}
         {live && <LinkButton to={to('reveal', at)}>Show the room</LinkButton>}

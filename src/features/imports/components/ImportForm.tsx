@@ -59,7 +59,7 @@ export function ImportForm({ panel, text, preview, onStored }: ImportFormProps) 
             <CheckRow
               {...form.register('leaveOutFaults')}
               id="leaveOutFaults"
-              label="Leave these rows out"
+              label={preview.faultCount === 1 ? 'Leave this row out' : 'Leave these rows out'}
               hint={`The other ${preview.rows === 1 ? 'row is' : `${preview.rows} rows are`} stored; the file itself stays as it is.`}
               error={errorAt('leaveOutFaults')}
             />

@@ -42,7 +42,9 @@ export function BadRows({ preview }: { preview: ImportPreview }) {
           preview.faultCount === 1 ? 'One fault in the file' : `${preview.faultCount} faults in the file`
         }
       >
-        Nothing is stored while they stand, unless you leave these rows out.
+        {preview.faultCount === 1
+          ? 'Nothing is stored while it stands, unless you leave this row out.'
+          : 'Nothing is stored while they stand, unless you leave these rows out.'}
       </Notice>
       <div className="mt-4">
         <DataTable

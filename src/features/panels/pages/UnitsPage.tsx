@@ -22,14 +22,22 @@ const unsaid = <span className="text-muted">asked before publishing</span>
 
 const columns: Column<Unit>[] = [
   { key: 'name', header: 'Unit', names: true, sortable: true, cell: (unit) => unit.name },
-  { key: 'maker', header: 'Maker', sortable: true, cell: (unit) => unit.maker },
+  {
+    key: 'maker',
+    header: 'Maker',
+    sortable: true,
+    cell: (unit) => unit.maker || <span className="text-muted">not said</span>,
+  },
   { key: 'provenance', header: 'How we got it', sortable: true, cell: (unit) => unit.provenance ?? unsaid },
   {
     key: 'price',
     header: 'Price, on the day',
     numeric: true,
-    cell: ({ price }) =>
-      price ? `${money(price.minor, price.currency)}, ${day(`${price.on}T00:00:00Z`, 'UTC')}` : unsaid,
+    cell: ({ price, provenance }) => {
+      if (price) return `${money(price.minor, price.currency)}, ${day(`${price.on}T00:00:00Z`, 'UTC')}`
+      // Where a unit came from is never told without its price, or that there is none.
+      return provenance ? 'no price' : unsaid
+    },
   },
   { key: 'rounds', header: 'Rounds', numeric: true, sortable: true, cell: (unit) => unit.rounds },
 ]

@@ -8,9 +8,16 @@ import { asMoney } from '../money.ts'
 
 type Unit = PublicVerdict['units'][number]
 
-const priceWords = (unit: Unit): string => {
+const priceWords = (unit: Unit, withDay: boolean): string => {
   if (unit.price === null) return unit.priceUnknown ? 'no price' : '–'
-  return `${asMoney(unit.price)}, ${day(unit.price.on, 'UTC')}`
+  return withDay ? `${asMoney(unit.price)}, ${day(unit.price.on, 'UTC')}` : asMoney(unit.price)
+}
+
+/** The one day on which all prices held; null where they differ. */
+function commonDay(units: readonly Unit[]): string | null {
+  const days = new Set(units.flatMap((unit) => (unit.price === null ? [] : [unit.price.on])))
+  const [first = null] = days
+  return days.size === 1 ? first : null
 }
 
 /** A photograph whole on paper, at most 320 px high. */
@@ -44,6 +51,7 @@ interface ComparedProps {
 /** What was set against what: maker, how the panel got it, price with its day, liking where it was asked. */
 export function Compared({ units, disclosures, results, anchor = 'compared' }: ComparedProps) {
   const liking = results.find((result) => result.descriptor.family === 'liking')
+  const priced = commonDay(units)
   const photos = units.filter((unit) => unit.photo !== null)
   return (
     <FolioSection
@@ -59,13 +67,20 @@ export function Compared({ units, disclosures, results, anchor = 'compared' }: C
           rowKey={(unit) => unit.id}
           columns={[
             { key: 'name', header: 'Unit', cell: (unit) => unit.name },
-            { key: 'maker', header: 'Maker', cell: (unit) => unit.maker },
+            ...(units.some((unit) => unit.maker !== '')
+              ? [{ key: 'maker', header: 'Maker', cell: (unit: Unit) => unit.maker }]
+              : []),
             {
               key: 'provenance',
               header: 'How we got it',
               cell: (unit) => (unit.provenance === null ? 'not said' : provenanceWords[unit.provenance].word),
             },
-            { key: 'price', header: 'Price and its day', numeric: true, cell: priceWords },
+            {
+              key: 'price',
+              header: priced ? `Price, ${day(priced, 'UTC')}` : 'Price and its day',
+              numeric: true,
+              cell: (unit) => priceWords(unit, priced === null),
+            },
             ...(liking
               ? [
                   {

@@ -1,7 +1,6 @@
 import type { PublicVerdict } from '#shared/contracts/verdicts.ts'
 import { FolioSection } from '#src/components/layout/Folio.tsx'
 import { Disclosure } from '#src/components/ui/Disclosure.tsx'
-import { IntervalScope } from '#src/components/results/IntervalScope.tsx'
 import { sentenceCase } from '#src/lib/counts.ts'
 import { methodWords } from '../method-words.ts'
 
@@ -69,7 +68,6 @@ export function Limits({ limits }: { limits: string[] }) {
         {limits.map((line) => (
           <p key={line}>{line}</p>
         ))}
-        <IntervalScope />
       </div>
     </FolioSection>
   )

@@ -40,6 +40,7 @@ function Entry({ verdict }: { verdict: VerdictLine }) {
         {verdict.panelName} · {counted(verdict.listeners, 'listener')} · {verdict.label.toLowerCase()} ·{' '}
         {day(verdict.publishedAt)}
       </p>
+      {verdict.labels.length > 0 && <p className="note">{verdict.labels.join(' · ')}</p>}
     </article>
   )
 }
