@@ -1,22 +1,12 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query'
-import { Link, useLocation, useNavigate } from 'react-router-dom'
-import { endSession, type Me } from '#shared/contracts/account.ts'
-import { call } from '#src/lib/call.ts'
+import { Link, useLocation } from 'react-router-dom'
+import type { Me } from '#shared/contracts/account.ts'
+import { useSignOut } from '#src/features/account/queries.ts'
 import { to } from './paths.ts'
 
 /** At the right of the top line: the panel and the person, and the way out; or the way in. */
 export function Who({ me, panel }: { me: Me; panel?: string | undefined }) {
-  const client = useQueryClient()
-  const navigate = useNavigate()
   const { pathname } = useLocation()
-  const signOut = useMutation({
-    mutationFn: () => call(endSession),
-    onSuccess: async () => {
-      await navigate(to('home'))
-      client.clear()
-      await client.invalidateQueries()
-    },
-  })
+  const signOut = useSignOut()
   if (!me.user) return <Link to={`${to('signIn')}?next=${encodeURIComponent(pathname)}`}>Sign in</Link>
   return (
     <>

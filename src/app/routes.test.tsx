@@ -1,9 +1,10 @@
 import { QueryClientProvider } from '@tanstack/react-query'
-import { render, screen } from '@testing-library/react'
+import { fireEvent, render, screen } from '@testing-library/react'
 import { createMemoryRouter, matchRoutes, RouterProvider } from 'react-router-dom'
 import { afterEach, describe, expect, it, vi } from 'vitest'
-import { getMe, type Me } from '#shared/contracts/account.ts'
+import { endSession, getMe, type Me } from '#shared/contracts/account.ts'
 import { getPanel, listRounds } from '#shared/contracts/panels.ts'
+import { listVerdicts } from '#shared/contracts/verdicts.ts'
 import { createQueryClient } from '#src/lib/query-client.ts'
 import { allowConsoleErrors } from '#tests/support/console.ts'
 import { fakeServer, Refusal } from '#tests/support/show-page.tsx'
@@ -59,6 +60,32 @@ describe('what cannot be shown', () => {
     expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent('Only members see this panel.')
   }, 20_000)
 })
+
+it('nothing of the person who signs out stays on the page', async () => {
+  let me: Me = {
+    ...nobody,
+    user: {
+      id: '33333333-3333-4333-8333-333333333333',
+      name: 'Ines Falk',
+      email: 'ines@example.org',
+      version: 1,
+    },
+    panels: [{ slug: 'quayside-bench', name: 'The Quayside Bench', roles: ['organiser'] }],
+  }
+  fakeServer()
+    .on(getMe, () => me)
+    .on(listVerdicts, () => ({ verdicts: [] }))
+    .on(endSession, () => {
+      me = nobody
+      return { done: true as const }
+    })
+  const router = visit('/how')
+  fireEvent.click(await screen.findByRole('button', { name: 'Sign out' }, { timeout: 10_000 }))
+  expect(await screen.findByRole('link', { name: 'Sign in' }, { timeout: 10_000 })).toBeVisible()
+  expect(screen.queryByText('Ines Falk')).toBeNull()
+  expect(screen.queryByText('The Quayside Bench')).toBeNull()
+  expect(router.state.location.pathname).toBe('/')
+}, 20_000)
 
 it('a page of the demo says that everything is invented', async () => {
   fakeServer().on(getMe, () => nobody)

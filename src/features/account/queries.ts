@@ -1,4 +1,5 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query'
+import { useNavigate } from 'react-router-dom'
 import {
   createAccount,
   createSession,
@@ -8,6 +9,7 @@ import {
   type Me,
 } from '#shared/contracts/account.ts'
 import type { BodyOf } from '#shared/contracts/endpoint.ts'
+import { to } from '#src/app/paths.ts'
 import { keyOf } from '#src/lib/ask.ts'
 import { call } from '#src/lib/call.ts'
 
@@ -36,9 +38,18 @@ export function useSignUp() {
   })
 }
 
+/** Ends the session, goes where anyone may be, and only then forgets what this person was shown. */
 export function useSignOut() {
   const client = useQueryClient()
-  return useMutation({ mutationFn: () => call(endSession), onSuccess: () => client.clear() })
+  const navigate = useNavigate()
+  return useMutation({
+    mutationFn: () => call(endSession),
+    onSuccess: async () => {
+      await navigate(to('home'))
+      client.removeQueries({ type: 'inactive' })
+      await client.resetQueries()
+    },
+  })
 }
 
 export function useRename(version: number) {

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query'
-import { Link, Navigate, useNavigate } from 'react-router-dom'
+import { Link, Navigate } from 'react-router-dom'
 import { to } from '#src/app/paths.ts'
 import { Asked } from '#src/components/asked/Asked.tsx'
 import { Folio, FolioSection } from '#src/components/layout/Folio.tsx'
@@ -12,7 +12,6 @@ import { useSignOut } from '../queries.ts'
 
 export default function AccountPage() {
   const query = useQuery(meQuery)
-  const navigate = useNavigate()
   const leave = useSignOut()
   return (
     <Asked query={query} waiting="Reading your account">
@@ -49,7 +48,7 @@ export default function AccountPage() {
                 kind="secondary"
                 busy={leave.isPending}
                 busyLabel="Signing out"
-                onClick={() => leave.mutate(undefined, { onSuccess: () => void navigate(to('home')) })}
+                onClick={() => leave.mutate()}
               >
                 Sign out
               </Button>
