@@ -95,6 +95,7 @@ describe('an evening, from sign-up to verdict', () => {
       handovers.find((one) => (typeof label === 'string' ? one.label === label : label.test(one.label)))
         ?.url ?? ''
     keeper = await browser.open({ baseURL: app.url, name: 'keeper' })
+    keeper.allow(/403/) // The page stays open when the round closes, and is told that there is nothing left to tag.
     await keeper.page.goto(new URL(path(/keeper/i)).pathname)
     await press(keeper.page, 'Tagged')
     await seen(keeper.page, /1 of \d tagged/)
@@ -215,7 +216,23 @@ describe('an evening, from sign-up to verdict', () => {
       .getByRole('dialog')
       .getByRole('button', { name: /^Close (the round|it all)/ })
       .click()
-    await seen(page, /Krippendorff/)
+    await seen(page, /closed/i)
+    await expect
+      .poll(
+        async () =>
+          (
+            (await (
+              await organiser.context.request.get(app.url + addressOf(getRound, { params: at }))
+            ).json()) as { status: string }
+          ).status,
+        within,
+      )
+      .toBe('closed')
+    await page.goto(`/p/${at.panel}/rounds/${at.round}/agreement`)
+    await page
+      .getByText(/Krippendorff/)
+      .first()
+      .waitFor({ state: 'attached', ...within })
     await seen(page, 'Small panel: at least six listeners on each unit')
     await page.goto(`/p/${at.panel}/rounds/${at.round}/reveal`)
     for (const _ of units) await press(page, 'Next')
