@@ -1,52 +1,13 @@
-import { screen, waitFor, within } from '@testing-library/react'
+import { screen, waitFor } from '@testing-library/react'
 import { userEvent } from '@testing-library/user-event'
 import { IDBFactory } from 'fake-indexeddb'
 import { afterEach, beforeEach, describe, expect, test, vi } from 'vitest'
-import {
-  answerEnd,
-  checkSeal,
-  confirmCode,
-  forgetSeat,
-  getSeat,
-  getSeatReport,
-  giveConsent,
-  submitRatings,
-  type PanelistSeat,
-} from '#shared/contracts/seats.ts'
-import { paths, to } from '#src/app/paths.ts'
-import { fakeServer, Refusal, showPage } from '#tests/support/show-page.tsx'
-import { otherSeatId, scorecardOf, seatFixture, seatId, servingFixture } from '../seat.fixture.ts'
-import SeatPage from './SeatPage.tsx'
-
-const show = (state: unknown = null) =>
-  showPage(SeatPage, paths.seat.pattern, { pathname: to('seat', { seat: seatId }), state }, { '/': 'home' })
-
-const card = scorecardOf(['warmth', 'width'])
-
-/** A server that holds one seat and moves it on as the real one does. */
-function seatServer(part: Partial<PanelistSeat>) {
-  const held = { seat: seatFixture(part) }
-  const set = (next: Partial<PanelistSeat>) => (held.seat = { ...held.seat, ...next })
-  const server = fakeServer()
-    .on(getSeat, () => held.seat)
-    .on(giveConsent, () => set({ step: 'waiting', consented: true }))
-    .on(confirmCode, ({ body }) =>
-      (body as { code: string }).code === '417'
-        ? set({ step: 'seal', serving: servingFixture({ sealChecked: false }) })
-        : new Refusal('invalid', 'Wrong code', { code: 'These are not the digits of your pouch.' }),
-    )
-    .on(checkSeal, () => set({ step: 'rate', serving: servingFixture() }))
-    .on(submitRatings, () => ({
-      outcome: 'taken' as const,
-      seat: set({ step: 'sent', serving: servingFixture({ state: 'submitted' }) }),
-    }))
-    .on(answerEnd, () => set({ step: 'thanks' }))
-  return { server, held, set }
-}
+import { forgetSeat, submitRatings } from '#shared/contracts/seats.ts'
+import { card, press, seatServer, showSeat } from '#tests/support/seat-server.tsx'
+import { otherSeatId, servingFixture } from '../seat.fixture.ts'
 
 const rating = () => seatServer({ step: 'rate', serving: servingFixture(), scorecard: card })
 const range = (name: string) => screen.getByRole('slider', { name })
-const press = (name: string | RegExp) => userEvent.click(screen.getByRole('button', { name }))
 
 /** Answers liking, warmth and width and comes to the last look. */
 async function answerAll() {
@@ -71,7 +32,7 @@ afterEach(() => vi.unstubAllGlobals())
 describe('before the first pouch', () => {
   test('what is coming is read first, then consent is asked once, and only adults take part', async () => {
     const { server } = seatServer({ step: 'consent', consented: false, turn: 0 })
-    show()
+    showSeat()
     await screen.findByText(/Four pairs of earphones/)
     await press('Go on')
     expect(screen.getByText(/by listener number, never by name/)).toBeVisible()
@@ -87,7 +48,7 @@ describe('before the first pouch', () => {
 
   test('a round that publishes no rows says so in its consent', async () => {
     seatServer({ step: 'consent', consented: false, publishesRows: false })
-    show()
+    showSeat()
     await userEvent.click(await screen.findByRole('button', { name: 'Go on' }))
     expect(screen.getByText(/this round publishes no rows/)).toBeVisible()
   })
@@ -97,7 +58,7 @@ describe('before the first pouch', () => {
       step: 'enter-code',
       serving: servingFixture({ state: 'handed', code: null, sealChecked: false }),
     })
-    show()
+    showSeat()
     const digits = await screen.findByRole('textbox', { name: 'Digits' })
     expect(document.body).not.toHaveTextContent('417')
     await userEvent.type(digits, '528{Enter}')
@@ -115,7 +76,7 @@ describe('before the first pouch', () => {
 describe('rating one serving', () => {
   test('liking comes first, families follow, and what is sent is what was touched', async () => {
     const { server } = rating()
-    show()
+    showSeat()
     await answerAll()
     await press('Send this serving')
     await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
@@ -133,7 +94,7 @@ describe('rating one serving', () => {
 
   test('a line left open cannot be sent, and the last look says how many are', async () => {
     const { server } = rating()
-    show()
+    showSeat()
     await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
     for (const verb of ['Next: tonal balance', 'Next: staging', 'Next: a remark', 'Next: a last look'])
       await press(verb)
@@ -144,13 +105,13 @@ describe('rating one serving', () => {
 
   test('a reload in the middle comes back to the same screen with the same answers', async () => {
     rating()
-    const before = show()
+    const before = showSeat()
     await screen.findByRole('heading', { level: 1, name: 'First, as a whole' })
     await press('Overall liking: a step towards like very much')
     await press('Next: tonal balance')
     await screen.findByText('saved on this phone')
     before.unmount()
-    show()
+    showSeat()
     await screen.findByRole('heading', { level: 1, name: 'Tonal balance' })
     await press('Back to overall liking')
     expect(range('Overall liking')).toHaveAttribute('aria-valuetext', '50 of 100, halfway')
@@ -158,7 +119,7 @@ describe('rating one serving', () => {
 
   test('without a network the serving stays on the phone, over a reload, and is sent once when it is back', async () => {
     const { server } = rating()
-    const before = show()
+    const before = showSeat()
     await answerAll()
     server.reachable = false
     await press('Send this serving')
@@ -168,7 +129,7 @@ describe('rating one serving', () => {
     before.unmount()
 
     server.reachable = true
-    show()
+    showSeat()
     await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
     expect(server.asked('submitRatings')).toHaveLength(1)
     expect(screen.queryByText(/not sent yet/)).not.toBeInTheDocument()
@@ -176,7 +137,7 @@ describe('rating one serving', () => {
 
   test('a double tap sends under one key', async () => {
     const { server } = rating()
-    show()
+    showSeat()
     await answerAll()
     await userEvent.dblClick(screen.getByRole('button', { name: 'Send this serving' }))
     await screen.findByRole('heading', { level: 1, name: 'Sent. Rest your ears' })
@@ -189,7 +150,7 @@ describe('rating one serving', () => {
       outcome: 'late' as const,
       seat: set({ step: 'closed', serving: null }),
     }))
-    show()
+    showSeat()
     await answerAll()
     await press('Send this serving')
     expect(await screen.findByText(/marked as late, and not counted/)).toBeVisible()
@@ -204,7 +165,7 @@ describe('rating one serving', () => {
       },
     } as unknown as IDBFactory
     const { server } = rating()
-    show()
+    showSeat()
     await screen.findByText(/does not let Scrim save/)
     await answerAll()
     await press('Send this serving')
@@ -216,7 +177,7 @@ describe('rating one serving', () => {
 describe('a serving that was set aside or missed', () => {
   test('says so while the next one is awaited', async () => {
     const { set } = seatServer({ step: 'waiting', serving: servingFixture({ state: 'void' }) })
-    const { client } = show()
+    const { client } = showSeat()
     await screen.findByText('The steward set your last serving aside')
     set({ serving: servingFixture({ state: 'missed' }) })
     await client.invalidateQueries()
@@ -228,7 +189,7 @@ describe('two people, one phone', () => {
   test('a seat that is through can be closed on a borrowed phone', async () => {
     const { server } = seatServer({ step: 'thanks' })
     server.on(forgetSeat, () => ({ done: true as const }))
-    const { router } = show()
+    const { router } = showSeat()
     await userEvent.click(await screen.findByRole('button', { name: 'Close this seat on this phone' }))
     await waitFor(() => expect(router.state.location.pathname).toBe('/'))
     expect(server.asked('forgetSeat')).toHaveLength(1)
@@ -236,68 +197,12 @@ describe('two people, one phone', () => {
 
   test('the other seat opens behind a plain screen that shows nothing of the one before', async () => {
     seatServer({ otherSeats: [{ id: otherSeatId, label: 'Seat 4' }] })
-    const { router } = show()
+    const { router } = showSeat()
     await userEvent.click(await screen.findByRole('button', { name: 'Hand the phone to Seat 4' }))
     expect(router.state.location.pathname).toBe(`/seat/${otherSeatId}`)
     await screen.findByRole('heading', { level: 1, name: /Hand the phone to/ })
     expect(screen.queryByText(/Next: your first/)).not.toBeInTheDocument()
     await press(/^I am /)
     await screen.findByRole('heading', { level: 1, name: 'Next: your first of four' })
-  })
-})
-
-describe('after the last serving', () => {
-  test('a recognition is told by one’s own code and in free text, never from a list of units', async () => {
-    const { server } = seatServer({
-      step: 'end-questions',
-      heard: [
-        { code: '417', ordinal: 1 },
-        { code: '528', ordinal: 2 },
-      ],
-    })
-    show()
-    await userEvent.click(await screen.findByRole('radio', { name: 'Perhaps' }))
-    await press('Send the answers')
-    const summary = await screen.findByRole('alert')
-    expect(within(summary).getByRole('link', { name: 'Say how sure you are.' })).toBeVisible()
-    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Which code' }), '528')
-    await userEvent.type(screen.getByRole('textbox', { name: 'What do you think it was?' }), 'the one I own')
-    await userEvent.click(screen.getByRole('radio', { name: 'A guess' }))
-    await press('Send the answers')
-    await screen.findByRole('heading', { level: 1, name: 'Thank you. That was all' })
-    expect(server.asked('answerEnd')[0]?.body).toEqual({
-      recognised: 'perhaps',
-      recognitions: [{ code: '528', text: 'the one I own', sure: 'guess' }],
-    })
-  })
-
-  test('the own report stands beside the panel’s, without a rank, and says where there are too few to show', async () => {
-    const { server } = seatServer({ step: 'closed', can: { seeReport: true } })
-    server.on(getSeatReport, () => ({
-      label: 'Seat 3',
-      roundTitle: 'Autumn evening',
-      scorecard: card,
-      units: [
-        {
-          maker: 'Saltmarsh Audio',
-          name: 'Dunlin',
-          code: '417',
-          ratings: [
-            { descriptor: 'warmth', yours: 70, cantTell: false, panelMedian: 58, n: 6 },
-            { descriptor: 'width', yours: null, cantTell: true, panelMedian: null, n: 4 },
-          ],
-        },
-      ],
-      verdictSlug: null,
-    }))
-    show()
-    expect(await screen.findByText('you 70 · the panel 58, 6 ratings')).toBeVisible()
-    expect(screen.getByText('you: can’t tell · the panel: too few ratings to show')).toBeVisible()
-  })
-
-  test('a phone that does not hold the seat says how to open it', async () => {
-    fakeServer().on(getSeat, () => new Refusal('not_found', 'There is nothing here.'))
-    show()
-    await screen.findByRole('heading', { level: 1, name: 'This seat is not open on this phone' })
   })
 })
