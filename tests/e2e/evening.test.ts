@@ -247,7 +247,7 @@ describe('an evening, from sign-up to verdict', () => {
     await page.goto(`/p/${at.panel}/rounds/${at.round}/verdict`)
     for (const [, name] of units) {
       const section = page.getByRole('region', { name })
-      await section.getByLabel('Bought').check(within)
+      await section.getByLabel('Bought', { exact: true }).check(within)
       await section
         .getByLabel('The sentence readers will see')
         .fill('Bought by the panel at the usual price.')
