@@ -9,8 +9,8 @@ import sharp from 'sharp'
 /** Which picture becomes which file, and how much of its height is kept. */
 const kept: readonly { from: string; to: string; height: number }[] = [
   { from: 'home-1280-light', to: 'home', height: 1200 },
-  { from: 'verdict-1280-light', to: 'verdict', height: 2600 },
-  { from: 'verdict-390-dusk', to: 'verdict-phone', height: 2000 },
+  { from: 'verdict-1280-light', to: 'verdict-1280', height: 2600 },
+  { from: 'verdict-390-dusk', to: 'verdict-390', height: 2000 },
   { from: 'agreement-1280-light', to: 'agreement', height: 2000 },
   { from: 'reveal-all-1280-dusk', to: 'reveal', height: 1000 },
   { from: 'plan-draft-1280-light', to: 'plan', height: 1500 },
