@@ -1,10 +1,13 @@
+import { useQuery } from '@tanstack/react-query'
 import { useState } from 'react'
 import { flushSync } from 'react-dom'
 import { createPortal } from 'react-dom'
+import type { PublicRound } from '#shared/contracts/rounds.ts'
 import type { Tags } from '#shared/contracts/tags.ts'
 import { Button } from '#src/components/ui/Button.tsx'
 import { shortRound } from '../due.ts'
 import { printed, type Printed } from '../printed.ts'
+import { fingerprintsQuery } from '../queries.ts'
 
 type What = 'sheet' | 'cards'
 
@@ -12,6 +15,8 @@ type What = 'sheet' | 'cards'
 export function Printing({ round, tags }: { round: string; tags: Tags }) {
   const [what, setWhat] = useState<What>('cards')
   const paper = printed(tags)
+  // On paper both fingerprints are out of anybody's reach; without them the sheet still serves.
+  const { data: prints } = useQuery(fingerprintsQuery(round))
   const print = (wanted: What) => {
     flushSync(() => setWhat(wanted))
     window.print()
@@ -33,7 +38,11 @@ export function Printing({ round, tags }: { round: string; tags: Tags }) {
       </p>
       {createPortal(
         <div className="print-only">
-          {what === 'cards' ? <Cards paper={paper} round={round} /> : <Sheet paper={paper} round={round} />}
+          {what === 'cards' ? (
+            <Cards paper={paper} round={round} />
+          ) : (
+            <Sheet paper={paper} round={round} prints={prints} />
+          )}
         </div>,
         document.body,
       )}
@@ -54,13 +63,22 @@ function Cards({ paper, round }: { paper: Printed; round: string }) {
   )
 }
 
-function Sheet({ paper, round }: { paper: Printed; round: string }) {
+type Prints = Pick<PublicRound, 'planFingerprint' | 'keyFingerprint'>
+
+function Sheet({ paper, round, prints }: { paper: Printed; round: string; prints: Prints | undefined }) {
   const codeAt = paper.head.indexOf('Code')
   return (
     <>
       <p>
         Round {shortRound(round)}. For whoever tags, for nobody else. Destroy it when the round is closed.
       </p>
+      {prints && (
+        <p>
+          Fixed when the round opened. plan.json {prints.planFingerprint}
+          <br />
+          key.json {prints.keyFingerprint}
+        </p>
+      )}
       <table className="print-sheet">
         <thead>
           <tr>

@@ -1,6 +1,7 @@
 import { screen, waitFor } from '@testing-library/react'
 import { userEvent } from '@testing-library/user-event'
 import { afterEach, describe, expect, test, vi } from 'vitest'
+import { getPublicRound, type PublicRound } from '#shared/contracts/rounds.ts'
 import { getTags, markTagged, type Tags } from '#shared/contracts/tags.ts'
 import { paths, to } from '#src/app/paths.ts'
 import { fakeServer, showPage } from '#tests/support/show-page.tsx'
@@ -12,6 +13,31 @@ const servings = ['8f2b1a2e-3c4d-4e5f-8a9b-0c1d2e3f4a51', '8f2b1a2e-3c4d-4e5f-8a
 const show = () => showPage(TagsPage, paths.tags.pattern, to('tags', at))
 /** The pouch in hand, which is announced when it changes. */
 const inHand = () => screen.getAllByRole('status').find((one) => one.classList.contains('pouch'))
+
+const opened: PublicRound = {
+  id: round,
+  panelName: 'The Quayside Bench',
+  title: 'Two in the dark',
+  question: 'Which one stays?',
+  status: 'open',
+  blinding: 'double',
+  openedAt: '2031-03-14T19:30:00.000Z',
+  closedAt: null,
+  cancelledAt: null,
+  cancelReason: null,
+  unitCount: 2,
+  listeners: 2,
+  scorecard: [],
+  primaryDescriptor: 'overall-liking',
+  tracks: [],
+  levelMatching: 'by-ear',
+  hiding: 'Sleeves',
+  turns: 2,
+  planFingerprint: '0'.repeat(64),
+  keyFingerprint: '0'.repeat(64),
+  verdictSlug: null,
+  keyIsPublic: false,
+}
 
 afterEach(() => {
   vi.unstubAllGlobals()
@@ -112,8 +138,12 @@ describe('behind the screen', () => {
 
   test('cards to cut out carry digits and the round’s sign, no unit; the sheet carries both', async () => {
     const print = vi.spyOn(window, 'print').mockImplementation(() => undefined)
-    fakeServer().on(getTags, keeper)
+    const [plan, key] = ['1'.repeat(64), '2'.repeat(64)]
+    const server = fakeServer()
+      .on(getTags, keeper)
+      .on(getPublicRound, () => ({ ...opened, planFingerprint: plan, keyFingerprint: key }))
     show()
+    await waitFor(() => expect(server.asked('getPublicRound')).toHaveLength(1))
     await userEvent.click(await screen.findByRole('button', { name: 'Print the cards' }))
     const paper = () => document.querySelector('.print-only')?.textContent ?? ''
     expect(print).toHaveBeenCalledTimes(1)
@@ -121,6 +151,8 @@ describe('behind the screen', () => {
     expect(paper()).not.toMatch(/Dunlin|Knot/)
     await userEvent.click(screen.getByRole('button', { name: 'Print the sheet' }))
     expect(paper()).toMatch(/Dunlin/)
+    await waitFor(() => expect(paper()).toContain(`plan.json ${plan}`))
+    expect(paper()).toContain(`key.json ${key}`)
     expect(print).toHaveBeenCalledTimes(2)
   })
 })
