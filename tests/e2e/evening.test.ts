@@ -255,8 +255,8 @@ describe('an evening, from sign-up to verdict', () => {
       await section.getByRole('button', { name: `Keep what is known of ${name}` }).click()
       await section.getByText('Kept.').waitFor(within)
     }
-    await page.getByLabel('Headline').fill('Four small ones, heard by seven on one evening')
-    await page.getByLabel('Summary').fill('Nobody knew which was which.')
+    await page.getByLabel('Headline', { exact: true }).fill('Four small ones, heard by seven on one evening')
+    await page.getByLabel('Summary', { exact: true }).fill('Nobody knew which was which.')
     await press(page, 'Keep the words')
     await press(page, 'Publish the verdict')
     await page.getByRole('dialog').getByRole('button', { name: 'Publish the verdict' }).click()

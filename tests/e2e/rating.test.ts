@@ -16,7 +16,9 @@ let evening: OpenEvening
 
 beforeAll(async () => {
   app = await startApp({ pages: true })
-  evening = await openEvening(app.url, anEvening({ scorecard: [...coreScorecard] }))
+  // As many units as listeners: in every turn each of them holds a pouch.
+  const units = [...anEvening().units, { maker: 'Eddy & Shoal', name: 'Godwit' }]
+  evening = await openEvening(app.url, anEvening({ units, scorecard: [...coreScorecard] }))
   await goOn(evening)
 })
 afterAll(() => app.close())
