@@ -10,6 +10,7 @@ import {
 export interface RoundFacts {
   status: RoundStatus
   origin: 'live' | 'imported'
+  blinding: 'double' | 'single' | 'split' | 'imported'
   roles: readonly RoundRole[]
 }
 
@@ -22,6 +23,12 @@ export const isBlinded = (facts: RoundFacts): boolean =>
 
 /** A single-blind keeper is the steward and knows the key: the round says so. */
 const keeps = (facts: RoundFacts): boolean => holds(facts, 'keeper')
+
+/** Roles that one browser may not use together, however it came by them: whoever knows the key neither listens nor stewards. */
+const conflicts = (facts: RoundFacts): boolean =>
+  (keeps(facts) && holds(facts, 'panelist', 'letters', 'codes')) ||
+  (keeps(facts) && holds(facts, 'steward') && facts.blinding !== 'single') ||
+  (holds(facts, 'letters') && holds(facts, 'codes'))
 
 export const maySeeRound = (facts: RoundFacts): boolean => facts.roles.length > 0
 export const mayOrganise = (facts: RoundFacts): boolean => holds(facts, 'organiser')
@@ -39,10 +46,11 @@ export const maySeeProgress = (facts: RoundFacts): boolean =>
   holds(facts, 'organiser', 'keeper', 'letters', 'codes', 'steward')
 export const mayHandOutLinks = (facts: RoundFacts): boolean =>
   facts.status === 'open' && holds(facts, 'organiser', 'steward')
-export const maySteward = (facts: RoundFacts): boolean => facts.status === 'open' && holds(facts, 'steward')
+export const maySteward = (facts: RoundFacts): boolean =>
+  facts.status === 'open' && holds(facts, 'steward') && !conflicts(facts)
 /** The key's whole is for the keeper; each half of a split key for one person. */
 export const mayTag = (facts: RoundFacts): boolean =>
-  facts.status === 'open' && holds(facts, 'keeper', 'letters', 'codes')
+  facts.status === 'open' && holds(facts, 'keeper', 'letters', 'codes') && !conflicts(facts)
 /** Nobody sees a rating in sum before closing (B2), and nobody ever in a cancelled round. */
 export const maySeeAgreement = (facts: RoundFacts): boolean => isRevealed(facts.status) && mayOrganise(facts)
 export const maySeeReveal = (facts: RoundFacts): boolean => isRevealed(facts.status) && facts.roles.length > 0

@@ -22,8 +22,10 @@ export interface SeatFacts {
   status: RoundStatus
   consented: boolean
   left: boolean
+  /** This browser also holds the keeper's duty in the round, by link or by signing in. */
+  knowsKey: boolean
 }
 
 export const mayRate = (facts: SeatFacts): boolean =>
-  facts.status === 'open' && facts.consented && !facts.left
+  facts.status === 'open' && facts.consented && !facts.left && !facts.knowsKey
 export const maySeeOwnReport = (facts: Pick<SeatFacts, 'status'>): boolean => isRevealed(facts.status)

@@ -23,21 +23,25 @@ export async function codeHistory(
       order by r.opened_at desc limit ${rememberedRounds}`,
     { bind: [round.panelId, round.id], type: QueryTypes.SELECT },
   )
-  const kept = await withKey(context, () =>
-    sequelize.query<{ round: string; code: number; unit: string }>(
-      `select w.round_id as round, p.code::int as code, k.unit_id as unit
+  const ids = (sealed: boolean): string[] =>
+    earlier.filter((one) => one.sealed === sealed).map((one) => one.id)
+  const pairs = await withKey(context, () =>
+    sequelize.query<{ code: number; unit: string }>(
+      `select distinct p.code::int as code, k.unit_id as unit
          from key_entries k
          join row_places p on p.id = k.row_place_id
          join rows w on w.id = p.row_id
         where w.panel_id = $1 and w.round_id = any($2::uuid[]) and k.unit_id = any($3::uuid[])`,
-      { bind: [round.panelId, earlier.map((one) => one.id), [...round.unitIds]], type: QueryTypes.SELECT },
+      { bind: [round.panelId, ids(false), [...round.unitIds]], type: QueryTypes.SELECT },
     ),
   )
-  const sealed = new Set(earlier.filter((one) => one.sealed).map((one) => one.id))
-  const pairs = new Map(
-    kept.filter((one) => !sealed.has(one.round)).map(({ code, unit }) => [`${code} ${unit}`, { code, unit }]),
+  // All codes of a sealed round, never those of one unit: the list is published with this round's key.
+  const codes = await sequelize.query<{ code: number }>(
+    `select distinct p.code::int as code from row_places p join rows w on w.id = p.row_id
+      where w.panel_id = $1 and w.round_id = any($2::uuid[])
+        and exists (select 1 from round_units u where u.round_id = w.round_id and u.unit_id = any($3::uuid[]))`,
+    { bind: [round.panelId, ids(true), [...round.unitIds]], type: QueryTypes.SELECT },
   )
-  const codes = new Set(kept.filter((one) => sealed.has(one.round)).map((one) => one.code))
   const memberIds = seats.flatMap((seat) => (seat.memberId === null ? [] : [seat.memberId]))
   const met = await sequelize.query<{ member: string; code: number }>(
     `select s.member_id as member, p.code::int as code
@@ -49,8 +53,8 @@ export async function codeHistory(
     { bind: [round.panelId, round.id, memberIds], type: QueryTypes.SELECT },
   )
   return {
-    pairs: [...pairs.values()],
-    codes: [...codes],
+    pairs,
+    codes: codes.map((one) => one.code),
     seats: seats.map(({ seatRef, memberId }) => ({
       seatRef,
       codes: met.filter((one) => one.member === memberId).map((one) => one.code),

@@ -63,5 +63,12 @@ export async function enterRound(context: Context, slug: string, roundId: string
   ]
   if (roles.length === 0) throw notFound()
   await enterScope(context, panel.id)
-  return { panel, round, member, roles, seat, facts: { status: round.status, origin: round.origin, roles } }
+  return {
+    panel,
+    round,
+    member,
+    roles,
+    seat,
+    facts: { status: round.status, origin: round.origin, blinding: round.blinding, roles },
+  }
 }

@@ -131,6 +131,8 @@ export async function addSeat(
     rowId: string
     codeSet: 'served' | 'takeover'
     afterTurn?: number
+    /** Turns by which the row runs later than it was drawn. */
+    shift?: number
   },
 ): Promise<Seat> {
   const token = linkToken(context.deps, 'seat', seat.id, 1)
@@ -153,6 +155,7 @@ export async function addSeat(
   })
   await Serving.bulkCreate(
     places
+      .map((place) => ({ id: place.id, position: place.position, turn: place.turn + (seat.shift ?? 0) }))
       .filter((place) => place.turn > (seat.afterTurn ?? 0))
       .map((place) => ({
         panelId,

@@ -4,6 +4,7 @@ import { notFound } from '#server/http/api-error.ts'
 import type { Context } from '#server/http/context.ts'
 import { Member } from '#server/models/member.ts'
 import { Panel } from '#server/models/panel.ts'
+import { RoundRole } from '#server/models/round-role.ts'
 import { Round } from '#server/models/round.ts'
 import { Seat } from '#server/models/seat.ts'
 import { Sitting } from '#server/models/sitting.ts'
@@ -32,8 +33,22 @@ export async function enterSeat(context: Context, id: string): Promise<SeatAcces
     round,
     sitting,
     panel,
-    facts: { status: round.status, consented: Boolean(seat.consentedAt), left: Boolean(seat.leftAt) },
+    facts: {
+      status: round.status,
+      consented: Boolean(seat.consentedAt),
+      left: Boolean(seat.leftAt),
+      knowsKey: await knowsKey(context, round),
+    },
   }
+}
+
+/** Whether this browser holds the keeper's duty in the round, however it came by it. */
+async function knowsKey(context: Context, round: Round): Promise<boolean> {
+  const keepers = await RoundRole.findAll({ where: { roundId: round.id, role: 'keeper' } })
+  if (keepers.some((one) => context.actor.dutyIds.includes(one.id))) return true
+  if (context.actor.userId === null) return false
+  const members = keepers.map((one) => one.memberId)
+  return (await Member.count({ where: { id: members, userId: context.actor.userId } })) > 0
 }
 
 async function isTheirs(context: Context, seat: Seat): Promise<boolean> {

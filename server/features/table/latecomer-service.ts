@@ -6,6 +6,7 @@ import { announce } from '#server/http/changes.ts'
 import type { Context } from '#server/http/context.ts'
 import { Member } from '#server/models/member.ts'
 import { RoundRole } from '#server/models/round-role.ts'
+import { RowPlace } from '#server/models/row-place.ts'
 import { Row } from '#server/models/row.ts'
 import { Seat } from '#server/models/seat.ts'
 import { Serving } from '#server/models/serving.ts'
@@ -15,6 +16,7 @@ interface FreeRow {
   rowId: string
   codeSet: 'served' | 'takeover'
   afterTurn: number
+  shift: number
 }
 
 async function rowOfLeaver(access: TableAccess, seatId: string): Promise<FreeRow> {
@@ -25,7 +27,7 @@ async function rowOfLeaver(access: TableAccess, seatId: string): Promise<FreeRow
     (await Seat.count({ where: { rowId: leaver.rowId, codeSet: 'takeover' } })) > 0
   )
     throw fieldError('insteadOf', 'Somebody took this row over already.')
-  return { rowId: leaver.rowId, codeSet: 'takeover', afterTurn: access.sitting.turn }
+  return { rowId: leaver.rowId, codeSet: 'takeover', afterTurn: access.sitting.turn, shift: 0 }
 }
 
 async function spareRow(access: TableAccess): Promise<FreeRow> {
@@ -43,7 +45,28 @@ async function spareRow(access: TableAccess): Promise<FreeRow> {
       'conflict',
       'No spare row is left. Somebody new can take the row of a listener who left.',
     )
-  return { rowId: free.id, codeSet: 'served', afterTurn: access.sitting.turn }
+  return {
+    rowId: free.id,
+    codeSet: 'served',
+    afterTurn: access.sitting.turn,
+    shift: await shiftOf(access, free.id),
+  }
+}
+
+/**
+ * A spare row drawn to run after the listeners' own turns starts when every turn already given out is over: in a turn
+ * shared with a void serving two pouches could need one specimen, and the keeper's face would tell (B1).
+ */
+async function shiftOf(access: TableAccess, rowId: string): Promise<number> {
+  const listeners = await Row.findAll({
+    where: { roundId: access.round.id, spare: false },
+    attributes: ['id'],
+  })
+  const drawn = await RowPlace.max<number, RowPlace>('turn', {
+    where: { rowId: listeners.map((one) => one.id) },
+  })
+  const first = await RowPlace.min<number, RowPlace>('turn', { where: { rowId } })
+  return first > drawn && first <= access.sitting.turns ? access.sitting.turns + 1 - first : 0
 }
 
 /** The member of this name, or a new one. @throws where they know the key */

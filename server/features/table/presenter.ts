@@ -29,6 +29,8 @@ export interface TableParts {
 export function presentTable(parts: TableParts): StewardTable {
   const ended = parts.sitting.endedAt !== null
   const { turn } = parts.sitting
+  // Pouches turn ready together: the order in which they are tagged could follow the units.
+  const allTagged = parts.seats.every((seat) => seat.left || seat.state !== 'waiting')
   return {
     round: {
       id: parts.round.id,
@@ -56,7 +58,7 @@ export function presentTable(parts: TableParts): StewardTable {
           : {
               id: seat.servingId,
               code: seat.code,
-              state: seat.state,
+              state: seat.state === 'tagged' && !allTagged ? 'waiting' : seat.state,
               version: seat.servingVersion ?? 1,
               wrongCodes: seat.wrongCodes ?? 0,
               seal: seat.seal,

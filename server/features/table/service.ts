@@ -2,7 +2,7 @@ import { QueryTypes } from 'sequelize'
 import type { StewardTable } from '#shared/contracts/table.ts'
 import { putOnRecord } from '#server/features/record/service.ts'
 import { enterRound, type RoundAccess } from '#server/features/rounds/access-service.ts'
-import { notFound } from '#server/http/api-error.ts'
+import { ApiError, notFound } from '#server/http/api-error.ts'
 import { announce } from '#server/http/changes.ts'
 import type { Context } from '#server/http/context.ts'
 import { permit } from '#server/http/permit.ts'
@@ -37,7 +37,7 @@ export async function viewTable(context: Context, access: TableAccess): Promise<
             v.wrong_codes as "wrongCodes", v.sealed as seal, v.rest_until as "restUntil"
        from seats s
        left join end_answers e on e.seat_id = s.id
-       left join servings v on v.seat_id = s.id and v.turn = greatest($2::int, 1)
+       left join servings v on v.seat_id = s.id and s.left_at is null and v.turn = greatest($2::int, 1)
        left join row_places p on p.id = v.row_place_id
       where s.sitting_id = $1 order by s.number`,
     { bind: [sitting.id, sitting.turn], type: QueryTypes.SELECT },
@@ -72,6 +72,13 @@ export async function setLeft(
 ): Promise<StewardTable> {
   const access = await enterTable(context, at, true)
   const seat = await seatOf(access, seatId)
+  // Two seats on one row would show two codes of one unit in each turn.
+  if (
+    !left &&
+    seat.codeSet === 'served' &&
+    (await Seat.count({ where: { rowId: seat.rowId, codeSet: 'takeover' } })) > 0
+  )
+    throw new ApiError('conflict', 'Somebody took this row over. Seat them anew as someone who came late.')
   if (Boolean(seat.leftAt) !== left) {
     await seat.update({ leftAt: left ? context.now : null })
     await putOnRecord(context, left ? 'listener left' : 'listener returned', {

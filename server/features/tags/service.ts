@@ -69,7 +69,7 @@ async function tagServing(
   if (!serving || !seat) throw fieldError('serving', 'This pouch is not of this sitting.')
   if (serving.state !== 'waiting') return
   await serving.update({ state: 'tagged', version: serving.version + 1 })
-  await announce(context, { round: roundId, seat: { id: seat.id, number: seat.number } })
+  await announce(context, { round: roundId })
 }
 
 async function markLetter(

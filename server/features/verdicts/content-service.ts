@@ -64,6 +64,7 @@ export async function composeVerdict(
   })
   const { scorecard, tracks } = await describeRound(round)
   const plan = planOfRound(round)
+  const results = publicResults(done.results, round.publishesRows)
   const figures = panelLabel([done.label.fewest]).publicFigures
   const listeners = new Set(done.analysed.rows.map((row) => row.panelist)).size
   const fileNames = [
@@ -80,13 +81,13 @@ export async function composeVerdict(
     question: round.question,
     headline: words.headline,
     summary: words.summary,
-    sentences: sentencesOf(done),
+    sentences: sentencesOf({ ...done, results }),
     certainty: certaintyOf(done, listeners),
     label: done.label,
     labels: done.labels,
     disclosures: units.map((unit) => `${unit.name}: ${unit.disclosure ?? ''}`),
     units,
-    results: figures ? publicResults(done.results) : [],
+    results: figures ? results : [],
     method: {
       origin: round.origin,
       blinding: round.blinding,

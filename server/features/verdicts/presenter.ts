@@ -1,6 +1,7 @@
 import type { DescriptorResult } from '#shared/contracts/analysis.ts'
 import type { PublicVerdict, VerdictDraft, VerdictLine } from '#shared/contracts/verdicts.ts'
 import { FEWEST_FOR_FIGURES } from '#shared/domain/panel-label.ts'
+import { differenceSentence } from '#shared/domain/verdict-words.ts'
 
 export interface UnitRow {
   id: string
@@ -60,24 +61,42 @@ export function missingOf(
   return missing
 }
 
-/** Results fit for the public: no figure of a unit rests on fewer than five listeners (B7). */
-export function publicResults(results: readonly DescriptorResult[]): DescriptorResult[] {
+/**
+ * Results fit for the public: no figure of a unit, in numbers or in words, rests on fewer than five listeners (B7), and
+ * where the round publishes no rows no single rating stands here either.
+ */
+export function publicResults(
+  results: readonly DescriptorResult[],
+  publishesRows: boolean,
+): DescriptorResult[] {
   return results.map((result) => {
-    const thin = new Set(
-      result.units.filter((unit) => unit.listeners < FEWEST_FOR_FIGURES).map((unit) => unit.unit),
-    )
-    if (thin.size === 0) return result
-    const nothing = { scores: [], median: null, q1: null, q3: null, mean: null, sd: null, adjusted: null }
-    return {
-      ...result,
-      units: result.units.map((unit) => (thin.has(unit.unit) ? { ...unit, ...nothing } : unit)),
-      pairs: result.pairs.filter((pair) => !thin.has(pair.a) && !thin.has(pair.b)),
-      notes: [
-        ...result.notes,
-        `Not shown, since fewer than five listeners rated them here: ${[...thin].join(', ')}.`,
-      ],
-    }
+    const thin = result.units.filter((unit) => unit.listeners < FEWEST_FOR_FIGURES).map((unit) => unit.unit)
+    const units = publishesRows ? result.units : result.units.map((unit) => ({ ...unit, scores: [] }))
+    return thin.length === 0 ? { ...result, units } : withoutThin({ ...result, units }, thin)
   })
+}
+
+function withoutThin(result: DescriptorResult, thin: readonly string[]): DescriptorResult {
+  const nothing = { scores: [], median: null, q1: null, q3: null, mean: null, sd: null, adjusted: null }
+  const { descriptor, model } = result
+  const pairs = result.pairs.filter((pair) => !thin.includes(pair.a) && !thin.includes(pair.b))
+  const scale = {
+    name: descriptor.name,
+    ...descriptor.scale,
+    lowWords: descriptor.words.low,
+    highWords: descriptor.words.high,
+  }
+  const unitsDiffer = 'unitTest' in model && model.unitTest !== null && model.unitTest.p < 0.05
+  return {
+    ...result,
+    units: result.units.map((unit) => (thin.includes(unit.unit) ? { ...unit, ...nothing } : unit)),
+    pairs,
+    sentence: differenceSentence(scale, pairs, unitsDiffer),
+    notes: [
+      ...result.notes.filter((note) => !thin.some((name) => note.includes(name))),
+      `Not shown, since fewer than five listeners rated them here: ${thin.join(', ')}.`,
+    ],
+  }
 }
 
 /** One line of the contents: the sentence over a heard line of the primary descriptor. */
