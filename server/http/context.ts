@@ -7,6 +7,8 @@ export interface Actor {
   userId: string | null
   seatIds: readonly string[]
   dutyIds: readonly string[]
+  /** Which version of its link opened each duty: a renewed link ends what the old one opened. Absent: not by a link. */
+  dutyVersions?: Readonly<Record<string, number>>
 }
 
 /** What a service gets beside its input. Every query inside takes part in the request's transaction. */
@@ -37,5 +39,5 @@ export interface SessionHandle {
   id(): string
   openSeat(seatId: string): void
   forgetSeat(seatId: string): void
-  openDuty(dutyId: string): void
+  openDuty(dutyId: string, linkVersion: number): void
 }

@@ -7,6 +7,7 @@ declare module 'express-session' {
   interface SessionData {
     seats?: string[]
     duties?: string[]
+    dutyVersions?: Record<string, number>
   }
 }
 /** What passport keeps of a signed-in user. */
@@ -22,6 +23,7 @@ export const actorOf = (request: Request): Actor => ({
   userId: (request.user as SignedIn | undefined)?.id ?? null,
   seatIds: request.session?.seats ?? [],
   dutyIds: request.session?.duties ?? [],
+  dutyVersions: request.session?.dutyVersions ?? {},
 })
 
 const settled = (work: (done: (error?: unknown) => void) => void): Promise<void> =>
@@ -49,7 +51,8 @@ export function sessionHandle(request: Request, response: Response): SessionHand
     forgetSeat: (seatId) => {
       request.session.seats = (request.session.seats ?? []).filter((one) => one !== seatId)
     },
-    openDuty: (dutyId) => {
+    openDuty: (dutyId, linkVersion) => {
+      request.session.dutyVersions = { ...request.session.dutyVersions, [dutyId]: linkVersion }
       request.session.duties = added(request.session.duties, dutyId)
     },
   }

@@ -6,6 +6,8 @@ export interface LabelFacts {
   levelMatching: 'measured' | 'by-ear' | 'not-matched' | null
   stewardListened: boolean
   publishesRows: boolean
+  /** A link to the key, or to a half of it, was opened and then renewed: somebody may have looked before the keeper. */
+  keyLinkRenewed: boolean
 }
 
 const blindingWords: Record<Blinding, string | null> = {
@@ -25,6 +27,7 @@ export function roundLabels(facts: LabelFacts): string[] {
   return [
     blindingWords[facts.blinding],
     facts.levelMatching === null ? null : levelWords[facts.levelMatching],
+    facts.keyLinkRenewed ? 'A link to the key was opened, and then renewed, during the round' : null,
     facts.stewardListened ? 'The steward also listened' : null,
     facts.publishesRows ? null : 'Ratings are not published row by row',
   ].filter((words) => words !== null && words !== undefined)

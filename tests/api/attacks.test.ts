@@ -67,6 +67,30 @@ describe('somebody who wants to know what a code hides', () => {
     ).toBe(403)
   })
 
+  it('is put out by a renewed link to the key, and the verdict says that it was opened before', async () => {
+    const people = [
+      { name: 'Ines Falk', you: true, listens: true, steward: true },
+      { name: 'Kaat', listens: false, duty: 'keeper' as const },
+      ...['Bram', 'Cleo', 'Dario', 'Edda', 'Finn', 'Gerd'].map((name) => ({ name, listens: true })),
+    ]
+    const evening = await openEvening(app.url, anEvening({ people }))
+    const at = { panel: evening.panel, round: evening.round }
+    const { handovers } = await evening.organiser.call(rounds.listHandovers, { params: at })
+    const link = handovers.find((one) => one.label.startsWith('Code keeper'))!
+    const open = (url: string) => ({ params: { token: url.split('/').at(-1) ?? '' } })
+    const [thief, kaat] = [visit(app.url), visit(app.url)]
+    await thief.call(seats.join, open(link.url))
+    expect(await statusOf(kaat.call(seats.join, open(link.url)))).toBe(403)
+    const renewed = await evening.organiser.call(rounds.renewLink, { params: { ...at, link: link.id } })
+    await kaat.call(seats.join, open(renewed.url))
+    expect(await statusOf(kaat.call(getTags, { params: evening.at }))).toBe(200)
+    expect(await statusOf(thief.call(getTags, { params: evening.at }))).toBe(404)
+    await playAll(evening)
+    const slug = await publishEvening(evening)
+    const verdict = await visit(app.url).call(getVerdict, { params: { slug } })
+    expect(verdict.labels).toContain('A link to the key was opened, and then renewed, during the round')
+  })
+
   it('sees no second code of a row: who left cannot come back onto a row that was taken over', async () => {
     const evening = await openEvening(app.url)
     await goOn(evening)

@@ -3,6 +3,7 @@ import type { Agreement } from '#shared/contracts/analysis.ts'
 import { unitNames } from '#shared/domain/unit-names.ts'
 import { unitsOf } from '#server/features/rounds/facts-service.ts'
 import type { Context } from '#server/http/context.ts'
+import { AuditEvent } from '#server/models/audit-event.ts'
 import { EndAnswer } from '#server/models/end-answer.ts'
 import { Member } from '#server/models/member.ts'
 import { RoundRole } from '#server/models/round-role.ts'
@@ -78,4 +79,13 @@ export async function stewardListened(round: Round): Promise<boolean> {
   const roles = await RoundRole.findAll({ where: { roundId: round.id, role: ['steward', 'panelist'] } })
   const stewards = new Set(roles.filter((one) => one.role === 'steward').map((one) => one.memberId))
   return roles.some((one) => one.role === 'panelist' && stewards.has(one.memberId))
+}
+
+/** Whether a link to the key was opened and then renewed: whoever opened it first has seen what it shows. */
+export async function keyLinkRenewed(round: Round): Promise<boolean> {
+  const renewals = await AuditEvent.findAll({ where: { roundId: round.id, action: 'link renewed' } })
+  return renewals.some(({ facts }) => {
+    const { role, wasOpened } = facts as { role?: string; wasOpened?: boolean }
+    return wasOpened === true && ['keeper', 'letters', 'codes'].includes(role ?? '')
+  })
 }

@@ -13,7 +13,13 @@ import * as may from '#server/policies/round.ts'
 import { analysed, type Analysed } from './analysed-service.ts'
 import { presentDescriptorResult } from './presenter.ts'
 import { countedRatings } from './ratings-service.ts'
-import { listenersOf, recognisedIn, servingCounts, stewardListened } from './quality-service.ts'
+import {
+  keyLinkRenewed,
+  listenersOf,
+  recognisedIn,
+  servingCounts,
+  stewardListened,
+} from './quality-service.ts'
 
 interface At {
   panel: string
@@ -61,6 +67,7 @@ export async function resultsOf(context: Context, round: Round): Promise<RoundRe
     blinding: round.blinding,
     levelMatching: plan?.levelMatching ?? null,
     stewardListened: await stewardListened(round),
+    keyLinkRenewed: await keyLinkRenewed(round),
     publishesRows: round.publishesRows,
   })
   return {

@@ -35,13 +35,20 @@ export async function enterRound(context: Context, slug: string, roundId: string
     actor.userId === null
       ? null
       : await Member.findOne({ where: { panelId: panel.id, userId: actor.userId, removedAt: null } })
-  const held = await RoundRole.findAll({
+  const found = await RoundRole.findAll({
     where: {
       panelId: panel.id,
       roundId,
       [Op.or]: [{ id: [...actor.dutyIds] }, ...(member ? [{ memberId: member.id }] : [])],
     },
   })
+  // A renewed link ends what the old one opened.
+  const held = found.filter(
+    (one) =>
+      one.memberId === member?.id ||
+      actor.dutyVersions === undefined ||
+      actor.dutyVersions[one.id] === one.linkVersion,
+  )
   const memberIds = [...new Set([...held.map((one) => one.memberId), ...(member ? [member.id] : [])])]
   const seat = await Seat.findOne({
     where: { panelId: panel.id, roundId, [Op.or]: [{ id: [...actor.seatIds] }, { memberId: memberIds }] },

@@ -48,7 +48,7 @@ export async function handoversOf(
   return made
 }
 
-/** A new link for a seat or duty of this round; the old one stops working, phones that are in stay in. */
+/** A new link for a seat or duty of this round; the old one stops working. A seat's phones stay in; whoever opened a duty is out. */
 export async function renew(
   context: Context,
   roundId: string,
@@ -60,6 +60,7 @@ export async function renew(
   const link = seat ?? duty
   if (!link) throw notFound()
   const kind: LinkKind = seat ? 'seat' : 'duty'
+  const wasOpened = Boolean(link.openedAt)
   const linkVersion = link.linkVersion + 1
   const renewed = {
     linkVersion,
@@ -67,7 +68,10 @@ export async function renew(
     openedAt: null,
   }
   await (seat ? seat.update(renewed) : duty?.update(renewed))
-  await putOnRecord(context, 'link renewed', { roundId, facts: { kind } })
+  await putOnRecord(context, 'link renewed', {
+    roundId,
+    facts: { kind, role: duty?.role ?? 'panelist', wasOpened },
+  })
   const label = seat ? seat.label : `${dutyNames[duty?.role ?? '']}: ${await nameOf(duty?.memberId ?? '')}`
   return handover(context, kind, link, label)
 }

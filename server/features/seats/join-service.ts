@@ -57,13 +57,13 @@ async function openSeat(context: Context, round: Round, seat: Seat): Promise<str
 
 /** The key and its halves open once: a second opening shows that somebody else was there first. */
 async function openDuty(context: Context, panel: Panel, round: Round, duty: RoundRole): Promise<string> {
-  const mine = context.actor.dutyIds.includes(duty.id)
+  const mine = context.actor.dutyVersions?.[duty.id] === duty.linkVersion
   if (duty.openedAt && duty.role !== 'steward' && !mine)
     throw new ApiError(
       'forbidden',
       'This link was opened already, on another phone. If that was not you, tell the organiser before anybody listens; a new link replaces it.',
     )
-  context.session.openDuty(duty.id)
+  context.session.openDuty(duty.id, duty.linkVersion)
   if (!duty.openedAt) {
     await duty.update({ openedAt: context.now })
     await putOnRecord(context, 'duty opened', { roundId: round.id, facts: { role: duty.role } })
